@@ -1,0 +1,43 @@
+import { connect, createServer } from 'node:net';
+
+function listenOnce(port, host) {
+  return new Promise((resolve, reject) => {
+    const server = createServer();
+    server.once('error', reject);
+    server.listen({ port, host }, () => {
+      const { port: taken } = server.address();
+      server.close(() => resolve(taken));
+    });
+  });
+}
+
+/** A port nobody listens on at the moment. */
+export function anyFreePort(host = '127.0.0.1') {
+  return listenOnce(0, host);
+}
+
+/** The wanted port, or the next one up that is free; undefined when a hundred in a row are taken. */
+export async function freePortFrom(wanted, host) {
+  for (let port = wanted; port < Math.min(wanted + 100, 65_536); port += 1) {
+    try {
+      return await listenOnce(port, host);
+    } catch (error) {
+      if (error.code !== 'EADDRINUSE' && error.code !== 'EACCES') throw error;
+    }
+  }
+  return undefined;
+}
+
+/** Whether something on this machine takes a connection on the port. */
+export function answers(port) {
+  return new Promise((resolve) => {
+    const socket = connect({ port, host: '127.0.0.1' });
+    const finish = (answer) => {
+      socket.destroy();
+      resolve(answer);
+    };
+    socket.setTimeout(2000, () => finish(false));
+    socket.once('connect', () => finish(true));
+    socket.once('error', () => finish(false));
+  });
+}

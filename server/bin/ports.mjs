@@ -1,4 +1,5 @@
 import { connect, createServer } from 'node:net';
+import { setTimeout as wait } from 'node:timers/promises';
 
 function listenOnce(port, host) {
   return new Promise((resolve, reject) => {
@@ -29,9 +30,9 @@ export async function freePortFrom(wanted, host) {
 }
 
 /** Whether something on this machine takes a connection on the port. */
-export function answers(port) {
+export function answers(port, host = '127.0.0.1') {
   return new Promise((resolve) => {
-    const socket = connect({ port, host: '127.0.0.1' });
+    const socket = connect({ port, host: host === '0.0.0.0' ? '127.0.0.1' : host });
     const finish = (answer) => {
       socket.destroy();
       resolve(answer);
@@ -40,4 +41,12 @@ export function answers(port) {
     socket.once('connect', () => finish(true));
     socket.once('error', () => finish(false));
   });
+}
+
+/** Waits until something answers on the port, `ended` comes to pass, or the patience is over. */
+export async function untilAnswers(port, { host, ended, patienceMs }) {
+  let over = false;
+  void ended.then(() => (over = true));
+  const until = Date.now() + patienceMs;
+  while (!over && Date.now() < until && !(await answers(port, host))) await wait(100);
 }

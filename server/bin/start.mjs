@@ -5,17 +5,20 @@ import { Failure, sentencesFor } from './failure.mjs';
 import { withLock } from './lock.mjs';
 import { requireNode } from './node-version.mjs';
 import { ensurePackages } from './packages.mjs';
-import { freePortFrom } from './ports.mjs';
+import { untilAnswers } from './ports.mjs';
 import { inProject } from './project.mjs';
 import { endServersLeftOver, forgetStart, noteStart } from './running-starts.mjs';
+import { choosePort } from './serving-port.mjs';
 import { serve, serveWhileDeveloping } from './serve.mjs';
 import { exitCodeForStop, listenForStop, stepUnlessStopped, stopSignal } from './stop-request.mjs';
 
 const CLUSTER_FOLDER = inProject('.pg');
 const CLUSTER_LOCK = inProject('.run', 'cluster.lock');
 const PREPARING_LOCK = inProject('.run', 'preparing.lock');
+const PORT_LOCK = inProject('.run', 'port.lock');
+// A server that first fills an empty database with the demo laboratory may take this long before it listens.
+const LISTENING_PATIENCE_MS = 120_000;
 const DATABASE = 'hacklebook';
-const USUAL_PORT = 3000;
 
 const develop = process.argv.includes('--develop');
 const usesCluster = !process.env.DATABASE_URL;
@@ -65,17 +68,23 @@ function leave() {
   );
 }
 
-async function choosePort(host) {
-  const wanted = process.env.PORT ? Number(process.env.PORT) : USUAL_PORT;
-  if (!Number.isInteger(wanted) || wanted < 1 || wanted > 65_535) {
-    throw new Failure(`PORT is "${process.env.PORT}", which is not a port.`, 'Give a number from 1 to 65535.');
-  }
-  const port = await freePortFrom(wanted, host);
-  if (port === undefined) {
-    throw new Failure(`Port ${wanted} and the hundred after it are taken.`, 'Give another with PORT=…');
-  }
-  if (port !== wanted) say(`Port ${wanted} is taken; taking ${port} instead.`);
-  return String(port);
+/** Serves on a port chosen while no other start chooses, until the server ends or a stop is asked for. */
+async function serveOn(host, databaseUrl) {
+  const onBegin = (begun) => {
+    server = begun;
+    noteStart({ usesCluster, serverPid: begun.pid });
+  };
+  let serving;
+  const begin = async () => {
+    const port = await choosePort(host, say);
+    const uploads = process.env.HACKLEBOOK_UPLOADS || inProject('uploads');
+    const variables = { DATABASE_URL: databaseUrl, HOST: host, PORT: String(port), HACKLEBOOK_UPLOADS: uploads };
+    serving = (develop ? serveWhileDeveloping : serve)({ variables, onBegin, say });
+    const ended = serving.catch(() => undefined);
+    await untilAnswers(port, { host, ended, patienceMs: LISTENING_PATIENCE_MS });
+  };
+  await withLock(PORT_LOCK, begin, { signal, say });
+  await serving;
 }
 
 async function run() {
@@ -85,18 +94,7 @@ async function run() {
   try {
     const databaseUrl = await bringUpDatabase();
     stepUnlessStopped();
-    const host = process.env.HOST || '127.0.0.1';
-    const variables = {
-      DATABASE_URL: databaseUrl,
-      HOST: host,
-      PORT: await choosePort(host),
-      HACKLEBOOK_UPLOADS: process.env.HACKLEBOOK_UPLOADS || inProject('uploads'),
-    };
-    const onBegin = (begun) => {
-      server = begun;
-      noteStart({ usesCluster, serverPid: begun.pid });
-    };
-    await (develop ? serveWhileDeveloping : serve)({ variables, onBegin, say });
+    await serveOn(process.env.HOST || '127.0.0.1', databaseUrl);
   } finally {
     await leave();
   }

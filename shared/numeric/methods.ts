@@ -1,0 +1,30 @@
+import { bend3RectLocal } from './methods/bend3-rect-local.ts';
+import { bend3Rect } from './methods/bend3-rect.ts';
+import { bend4RectLocal } from './methods/bend4-rect-local.ts';
+import { bend4Rect } from './methods/bend4-rect.ts';
+import { flawStress } from './methods/flaw-stress.ts';
+import type { Method } from './methods/method.ts';
+import { mirrorStress } from './methods/mirror-stress.ts';
+
+/** Every method that can be run, all versions of each. A changed formula is one more entry; none is ever taken out. */
+export const methods: readonly Method[] = [
+  bend3Rect,
+  bend4Rect,
+  bend3RectLocal,
+  bend4RectLocal,
+  mirrorStress,
+  flawStress,
+];
+
+/** The method of that id and version, or nothing. */
+export function findMethod(id: string, version: number): Method | undefined {
+  return methods.find((method) => method.id === id && method.version === version);
+}
+
+/** The newest version of a method, for a new estimate; nothing for an unknown id. */
+export function findCurrentMethod(id: string): Method | undefined {
+  return methods
+    .filter((method) => method.id === id)
+    .sort((one, other) => other.version - one.version)
+    .at(0);
+}

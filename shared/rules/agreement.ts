@@ -1,0 +1,145 @@
+import { pooledStress, type PooledStress } from '../numeric/comparison/pooled-stress.ts';
+import { stressDifference, type StressPair } from '../numeric/comparison/stress-difference.ts';
+import type { EstimateLine, Verdict } from '../vocabulary/estimate-lines.ts';
+import { agreementPattern, type AgreementPattern } from './agreement-pattern.ts';
+
+/** Version of the rule below; kept with every verdict, so that an old one can be read by the rule it was given under. */
+export const agreementRuleVersion = 1;
+
+// In standard uncertainties of the difference: 2 is |E_n| = 1, 3 is |E_n| = 1.5.
+const zetaAgree = 2;
+const zetaDoubtful = 3;
+// Above this u/σ the test could not have failed by less than half the stress.
+const weakRelativeUncertainty = 0.25;
+// 95 % points of χ² by degrees of freedom.
+const chiSquaredLimits: Readonly<Record<number, number>> = { 1: 3.841, 2: 5.991 };
+
+export type PairVerdict = Exclude<Verdict, 'too few'>;
+export type PairJudged = {
+  readonly zeta: number;
+  readonly en: number;
+  readonly verdict: PairVerdict;
+  /** Beside "agree" only: one side is so uncertain that agreeing says little. */
+  readonly weakly: boolean;
+};
+
+/**
+ * Verdict on two stresses at the same point and of the same kind.
+ * @throws OutsideDomain missing-uncertainty and others, as `stressDifference`
+ */
+export function judgePair(pair: StressPair): PairJudged {
+  const { zeta, en } = stressDifference(pair);
+  const apart = Math.abs(zeta);
+  const verdict = apart <= zetaAgree ? 'agree' : apart <= zetaDoubtful ? 'doubtful' : 'disagree';
+  const relative = Math.max(pair.u1MPa / Math.abs(pair.stress1MPa), pair.u2MPa / Math.abs(pair.stress2MPa));
+  return { zeta, en, verdict, weakly: verdict === 'agree' && relative > weakRelativeUncertainty };
+}
+
+/** An input that several lines may share, such as the scale of one image. */
+export type SharedInput = {
+  /** The same in both lines: `calibration:…`. */
+  readonly key: string;
+  /** Shown: "scale of the image". */
+  readonly label: string;
+  /** Sensitivity × standard uncertainty, signed, MPa; for the scale of a mirror −½ σ u(s)/s. */
+  readonly contributionMPa: number;
+};
+
+export type LineReading = {
+  readonly line: EstimateLine;
+  readonly stressMPa: number;
+  /** MPa, > 0. */
+  readonly standardUncertaintyMPa: number;
+  readonly setAside: boolean;
+  readonly shared: readonly SharedInput[];
+};
+
+export type JudgedPair = PairJudged & {
+  readonly lines: readonly [EstimateLine, EstimateLine];
+  /** Labels of what they share, for "two lines, one scale". */
+  readonly sharedInputs: readonly string[];
+};
+
+export type Agreement = {
+  readonly ruleVersion: typeof agreementRuleVersion;
+  readonly verdict: Verdict;
+  readonly weakly: boolean;
+  readonly pairs: readonly JudgedPair[];
+  /** `null` with fewer than two lines. */
+  readonly chiSquared: number | null;
+  readonly chiSquaredOverLimit: boolean;
+  /** `null` with fewer than three lines. */
+  readonly pattern: AgreementPattern | null;
+  /** The common stress; `null` when χ² is over its limit or there are fewer than two lines. */
+  readonly pooled: PooledStress | null;
+};
+
+/**
+ * Verdict on a case: the worst pair among the lines not set aside; χ² over its 95 % limit lowers agree to doubtful; fewer
+ * than two lines are too few. At most one reading a line.
+ * @throws OutsideDomain missing-uncertainty, when a line that counts has none
+ */
+export function judgeAgreement(readings: readonly LineReading[]): Agreement {
+  const counted = readings.filter((reading) => !reading.setAside);
+  const pairs = pairsOf(counted);
+  if (pairs.length === 0) return { ...nothingToCompare, ruleVersion: agreementRuleVersion };
+  const covariancesMPa2 = counted.map((one) => counted.map((other) => covariance(one, other)));
+  const pooled = pooledStress({ stressesMPa: counted.map((reading) => reading.stressMPa), covariancesMPa2 });
+  const limit = chiSquaredLimits[counted.length - 1];
+  const chiSquaredOverLimit = limit !== undefined && pooled.chiSquared > limit;
+  const worst = worstOf(pairs);
+  const verdict = worst === 'agree' && chiSquaredOverLimit ? 'doubtful' : worst;
+  return {
+    ruleVersion: agreementRuleVersion,
+    verdict,
+    weakly: verdict === 'agree' && pairs.some((pair) => pair.weakly),
+    pairs,
+    chiSquared: pooled.chiSquared,
+    chiSquaredOverLimit,
+    pattern: counted.length < 3 ? null : agreementPattern(counted, pairs.map(withAgrees)),
+    pooled: chiSquaredOverLimit ? null : pooled,
+  };
+}
+
+const nothingToCompare = {
+  verdict: 'too few',
+  weakly: false,
+  pairs: [],
+  chiSquared: null,
+  chiSquaredOverLimit: false,
+  pattern: null,
+  pooled: null,
+} as const;
+
+function pairsOf(readings: readonly LineReading[]): JudgedPair[] {
+  return readings.flatMap((one, index) => readings.slice(index + 1).map((other) => judgedPair(one, other)));
+}
+
+function judgedPair(one: LineReading, other: LineReading): JudgedPair {
+  const judged = judgePair({
+    stress1MPa: one.stressMPa,
+    u1MPa: one.standardUncertaintyMPa,
+    stress2MPa: other.stressMPa,
+    u2MPa: other.standardUncertaintyMPa,
+    covarianceMPa2: covariance(one, other),
+  });
+  const sharedInputs = one.shared.filter((input) => other.shared.some((each) => each.key === input.key));
+  return { ...judged, lines: [one.line, other.line], sharedInputs: sharedInputs.map((input) => input.label) };
+}
+
+function covariance(one: LineReading, other: LineReading): number {
+  if (one === other) return one.standardUncertaintyMPa ** 2;
+  return one.shared.reduce((sum, input) => {
+    const same = other.shared.find((each) => each.key === input.key);
+    return same ? sum + input.contributionMPa * same.contributionMPa : sum;
+  }, 0);
+}
+
+function worstOf(pairs: readonly JudgedPair[]): PairVerdict {
+  if (pairs.some((pair) => pair.verdict === 'disagree')) return 'disagree';
+  return pairs.some((pair) => pair.verdict === 'doubtful') ? 'doubtful' : 'agree';
+}
+
+function withAgrees(pair: JudgedPair) {
+  return { lines: pair.lines, agrees: pair.verdict === 'agree' };
+}

@@ -1,0 +1,32 @@
+/** Why a method gives no number. Closed: a new reason is added here and worded in `wording/refusal.ts`. */
+export const refusalCodes = [
+  'non-finite-input',
+  'non-positive-span',
+  'negative-inner-span',
+  'inner-span-not-less-than-outer',
+  'negative-load',
+  'non-positive-dimension',
+  'depth-outside-section',
+  'position-outside-span',
+  'chamfer-too-large',
+  'diameters-out-of-order',
+  'poisson-out-of-range',
+  'non-positive-stress',
+  'non-positive-flaw-size',
+  'non-positive-mirror-radius',
+  'non-positive-mirror-constant',
+  'non-positive-toughness',
+  'non-positive-shape-factor',
+  'non-positive-rate',
+  'flaw-deeper-than-section',
+  'outside-validity-range',
+  'too-few-points',
+  'points-in-line',
+  'points-not-on-an-ellipse',
+  'missing-uncertainty',
+  'negative-uncertainty',
+  'unknown-method',
+  'unknown-input',
+] as const;
+
+export type RefusalCode = (typeof refusalCodes)[number];

@@ -1,0 +1,15 @@
+export const caseActs = {
+  'case.opened': { words: 'opened the case' },
+  'case.changed': { words: 'changed the case' },
+  'case.assigned': { words: 'gave the case to someone' },
+  'case.taken': { words: 'took the case' },
+  'case.moved': { words: 'moved the case' },
+  'case.held': { words: 'put the case on hold' },
+  'case.resumed': { words: 'took the case off hold' },
+  'case.withdrawn': { words: 'withdrew the case' },
+  'case.restricted': { words: 'changed who sees the case' },
+  'questions.agreed': { words: 'agreed the questions' },
+  'background.added': { words: 'added to the background' },
+  'background.changed': { words: 'changed the background' },
+  'background.taken-back': { words: 'took back a statement of the background' },
+} as const;

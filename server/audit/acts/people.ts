@@ -1,0 +1,17 @@
+export const peopleActs = {
+  'organisation.entered': { words: 'entered an organisation' },
+  'person.invited': { words: 'invited a person' },
+  'person.admitted': { words: 'admitted a person' },
+  'invitation.taken-back': { words: 'took an invitation back' },
+  'invitation.accepted': { words: 'accepted an invitation' },
+  'person.changed': { words: 'changed an account' },
+  'person.closed': { words: 'closed an account' },
+  'person.opened-again': { words: 'opened a closed account again' },
+  'settings.changed': { words: 'changed own settings' },
+  'password.asked': { words: 'asked for a new password' },
+  'password.set': { words: 'set a new password' },
+  'person.signed-in': { words: 'signed in' },
+  'person.signed-out': { words: 'signed out' },
+  'person.signed-out-everywhere': { words: 'signed out everywhere' },
+  'sign-in.locked': { words: 'sign-in was locked after failed tries' },
+} as const;

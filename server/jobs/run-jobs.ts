@@ -1,0 +1,25 @@
+import { run, type Runner } from 'graphile-worker';
+import type { Logger } from 'pino';
+import { Logger as WorkerLogger } from 'graphile-worker';
+import type { Database } from '../database/connection.ts';
+import type { VisitorContext } from '../http/context.ts';
+
+/** A job's work: given the server's own context and what was put down with the job. It may be run a second time. */
+export type Task = (context: VisitorContext, payload: unknown) => Promise<void>;
+export type TaskTable = Readonly<Record<string, Task>>;
+
+/** Runs jobs from the database until stopped; several processes may run at once. */
+export function runJobs(database: Database, context: VisitorContext, tasks: TaskTable, log: Logger): Promise<Runner> {
+  return run({
+    pgPool: database.pool,
+    concurrency: 2,
+    noHandleSignals: true,
+    pollInterval: 2000,
+    logger: new WorkerLogger(() => (level, message) => {
+      if (level === 'error' || level === 'warning') log.warn({ level }, message);
+    }),
+    taskList: Object.fromEntries(
+      Object.entries(tasks).map(([name, task]) => [name, (payload: unknown) => task(context, payload)]),
+    ),
+  });
+}

@@ -1,0 +1,70 @@
+import { createServer, type Server } from 'node:http';
+import type { AddressInfo } from 'node:net';
+import { fileURLToPath } from 'node:url';
+import type { Express } from 'express';
+import { pino } from 'pino';
+import { allTasks } from './all-tasks.ts';
+import { answerProblem, makeApp } from './app.ts';
+import { connectDatabase } from './database/connection.ts';
+import { migrateDatabase } from './database/migrate.ts';
+import { visitorContext, type ContextParts } from './http/context.ts';
+import { servePages, servePagesLive } from './http/serve-pages.ts';
+import { acceptUpgrades } from './http/upgrades.ts';
+import { openSockets } from './open-sockets.ts';
+import { runJobs } from './jobs/run-jobs.ts';
+import type { Settings } from './settings.ts';
+import { localFolderStorage } from './storage/local-folder.ts';
+
+export type StartOptions = {
+  clock?: () => Date;
+  /** Leaves the pages out, where only the routes are asked. */
+  withoutPages?: boolean;
+};
+
+export type RunningServer = { address: string; parts: ContextParts; stop(): Promise<void> };
+
+/** Starts everything the server is: database brought up to date, jobs, sockets, routes and pages. */
+export async function startServer(settings: Settings, options: StartOptions = {}): Promise<RunningServer> {
+  const log = pino({ level: settings.logLevel });
+  const database = connectDatabase(settings.databaseUrl, 20);
+  await migrateDatabase(database);
+  const storage = await localFolderStorage(settings.uploadsFolder);
+  const parts: ContextParts = { database, storage, clock: options.clock };
+  const { app, sessions } = makeApp(parts, settings, log);
+  const server = createServer(app);
+  const closePages = options.withoutPages ? undefined : await putPagesOn(app, server, settings);
+  app.use(answerProblem);
+  const sockets = await openSockets(parts, settings, log);
+  const upgrades = acceptUpgrades(server, sessions, sockets.handlers);
+  const jobs = await runJobs(database, visitorContext(parts), allTasks, log);
+  await new Promise<void>((done, fail) => {
+    server.once('error', fail);
+    server.listen(settings.port, settings.host, done);
+  });
+  const stop = async () => {
+    upgrades.stop();
+    await sockets.stop();
+    server.closeAllConnections();
+    await new Promise((done) => server.close(done));
+    if (closePages) await closePages();
+    await jobs.stop();
+    await database.pool.end();
+  };
+  return { address: settings.address ?? addressOf(server.address(), settings.host), parts, stop };
+}
+
+async function putPagesOn(app: Express, server: Server, settings: Settings) {
+  if (settings.development) return servePagesLive(app, server);
+  servePages(app, clientFolder());
+  return undefined;
+}
+
+function addressOf(bound: AddressInfo | string | null, host: string): string {
+  return typeof bound === 'object' && bound ? `http://${host}:${bound.port}` : String(bound);
+}
+
+function clientFolder(): string {
+  // Bundled, this file stands in dist/server beside dist/client; from its source, two steps from dist/client.
+  const beside = new URL(import.meta.url.endsWith('.ts') ? '../dist/client' : '../client', import.meta.url);
+  return fileURLToPath(beside);
+}

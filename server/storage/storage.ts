@@ -1,0 +1,16 @@
+import type { Readable } from 'node:stream';
+
+/** The one way to bytes. Nothing outside this room knows a path or a key. */
+export type Storage = {
+  /** Writes a stream away while hashing it; the same bytes are kept once. */
+  keepOriginal(stream: Readable): Promise<{ sha256: string; bytes: number }>;
+  /** @throws when no such original is kept. */
+  readOriginal(sha256: string): Promise<Readable>;
+  /** A local file with the original's bytes, for a decoder that needs one; read-only. */
+  originalFile(sha256: string): Promise<string>;
+  /** Takes away the bytes of a refused file. */
+  dropOriginal(sha256: string): Promise<void>;
+  /** Bytes derived from an original (tiles, previews), which can be made again; `name` like `tiles/3/0_1.webp`. */
+  keepDerived(sha256: string, name: string, bytes: Uint8Array): Promise<void>;
+  readDerived(sha256: string, name: string): Promise<Uint8Array | null>;
+};

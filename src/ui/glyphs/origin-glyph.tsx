@@ -13,7 +13,7 @@ const shapes: Record<OriginShape, ReactNode> = {
       <circle cy="-2.2" r="3" />
     </g>
   ),
-  inclusion: <path d="M0-6L6 0 0 6-6 0Z" fill="currentColor" />,
+  inclusion: <path d="M0-5.6L5.6 0 0 5.6-5.6 0Z" fill="currentColor" />,
   'machining damage': <path d="M-5.8-2.9H5.8A5.8 6.8 0 0 1-5.8-2.9Z" fill="currentColor" />,
   'edge damage': <path d="M-5-5V5H5Z" fill="currentColor" />,
   'contact damage': <path d="M-5.4 4.6L-1.5-3.6H1.5L5.4 4.6" {...line} />,

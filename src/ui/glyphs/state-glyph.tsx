@@ -51,7 +51,7 @@ export function StateGlyph({ state, cameTo = 'received', amending = false, size 
           strokeDasharray={amending ? '2.5 2' : undefined}
         />
       ) : null}
-      {state === 'on hold' ? <path d="M2 16.2H22" stroke="currentColor" strokeWidth="1.5" /> : null}
+      {state === 'on hold' ? <path d="M2 16.4H22" stroke="currentColor" strokeWidth="1.6" /> : null}
       {state === 'withdrawn' ? <path d="M3 15.2L21 3" stroke="currentColor" strokeWidth="1.5" /> : null}
     </Glyph>
   );

@@ -1,0 +1,65 @@
+import { describe, expect, it } from 'vitest';
+import { methods } from '#shared/numeric/methods.ts';
+import { checkValues, type CheckValue } from './check-values.ts';
+import { notYet } from './not-yet.ts';
+import { runners } from './run-check-value.ts';
+
+// The methods that must be among those run, written out so that an empty table or an empty file fails.
+const run = [
+  'bend3.rect',
+  'bend3.rect.local',
+  'bend4.rect',
+  'bend4.rect.local',
+  'compare.pair',
+  'compare.pair.correlated',
+  'compare.triple',
+  'flaw.stress',
+  'mirror.stress',
+  'mirror.uncertainty',
+  'uncertainty.bend3.local',
+  'uncertainty.bend4.nominal',
+  'uncertainty.flaw',
+];
+
+const testable = checkValues.filter((entry) => entry.method in runners);
+const waiting = checkValues.filter((entry) => notYet.includes(entry.method));
+
+describe('the reference values', () => {
+  it('cover exactly the methods named here', () => {
+    expect([...new Set(testable.map((entry) => entry.method))].sort()).toEqual(run);
+  });
+
+  it('cover every method of the table', () => {
+    const referenced = new Set(checkValues.map((entry) => entry.method));
+    expect(methods.map((method) => method.id).filter((id) => !referenced.has(id))).toEqual([]);
+  });
+
+  it(`leave ${waiting.length} entries of ${notYet.length} methods waiting, each listed, none of them computed by now`, () => {
+    expect(notYet.filter((method) => method in runners)).toEqual([]);
+    expect(testable.length + waiting.length).toBe(checkValues.length);
+    const referenced = new Set(checkValues.map((entry) => entry.method));
+    expect(notYet.filter((method) => !referenced.has(method))).toEqual([]);
+  });
+});
+
+describe('the numbers agree with the reference', () => {
+  it.each(testable.map((entry): [string, string, CheckValue] => [entry.id, entry.method, entry]))(
+    '%s %s',
+    (_id, method, entry) => {
+      const answer = runners[method]?.(entry.inputs) ?? {};
+      for (const [name, { value }] of Object.entries(entry.expected)) {
+        expect(
+          agrees(answer[name], value, entry.tolerance),
+          `${name}: ${String(answer[name])} for ${String(value)}`,
+        ).toBe(true);
+      }
+    },
+  );
+});
+
+/** Numbers within the tolerance of the entry (its printed digits); words, yes and no, and all else exactly. */
+function agrees(found: unknown, wanted: unknown, tolerance: CheckValue['tolerance']): boolean {
+  if (typeof wanted !== 'number') return JSON.stringify(found) === JSON.stringify(wanted);
+  if (typeof found !== 'number') return false;
+  return Math.abs(found - wanted) <= (tolerance.rel ?? 0) * Math.abs(wanted) + (tolerance.abs ?? 0);
+}

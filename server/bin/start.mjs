@@ -9,6 +9,7 @@ import { untilAnswers } from './ports.mjs';
 import { inProject } from './project.mjs';
 import { endServersLeftOver, forgetStart, noteStart } from './running-starts.mjs';
 import { choosePort } from './serving-port.mjs';
+import { keptSecret } from './session-secret.mjs';
 import { serve, serveWhileDeveloping } from './serve.mjs';
 import { exitCodeForStop, listenForStop, stepUnlessStopped, stopSignal } from './stop-request.mjs';
 
@@ -77,8 +78,13 @@ async function serveOn(host, databaseUrl) {
   let serving;
   const begin = async () => {
     const port = await choosePort(host, say);
-    const uploads = process.env.HACKLEBOOK_UPLOADS || inProject('uploads');
-    const variables = { DATABASE_URL: databaseUrl, HOST: host, PORT: String(port), HACKLEBOOK_UPLOADS: uploads };
+    const variables = {
+      DATABASE_URL: databaseUrl,
+      HOST: host,
+      PORT: String(port),
+      HACKLEBOOK_UPLOADS: process.env.HACKLEBOOK_UPLOADS || inProject('uploads'),
+      HACKLEBOOK_SECRET: process.env.HACKLEBOOK_SECRET || keptSecret(inProject('.run', 'session-secret')),
+    };
     serving = (develop ? serveWhileDeveloping : serve)({ variables, onBegin, say });
     const ended = serving.catch(() => undefined);
     await untilAnswers(port, { host, ended, patienceMs: LISTENING_PATIENCE_MS });

@@ -57,7 +57,11 @@ export function runCommand(program, parameters, { cwd, env = cleanEnvironment(),
   });
 }
 
-/** The last lines of a program's output, for a failure's message. */
+const COLOUR = new RegExp(`${String.fromCharCode(27)}\\[[0-9;]*m`, 'g');
+const STACK_BEGIN = /\n\s+at .*:\d+:\d+/;
+
+/** The last lines of a program's output before any stack trace, without colours, for a failure's message. */
 export function lastLines(output, count = 15) {
-  return output.trimEnd().split('\n').slice(-count).join('\n');
+  const [told] = output.replace(COLOUR, '').split(STACK_BEGIN);
+  return told.trim().split('\n').slice(-count).join('\n');
 }

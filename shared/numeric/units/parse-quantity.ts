@@ -21,11 +21,11 @@ export type QuantityWanted = {
 };
 
 const kindInWords: Readonly<Record<UnitKind, string>> = {
-  length: 'a length',
-  force: 'a force',
-  stress: 'a stress',
-  toughness: 'a toughness',
-  dimensionless: 'a plain number',
+  length: 'length',
+  force: 'force',
+  stress: 'stress',
+  toughness: 'toughness',
+  dimensionless: 'plain ratio',
 };
 
 // Masses that are typed where a force is meant.
@@ -88,7 +88,7 @@ function massForForce(unitText: string, forceUnit: string, kind: UnitKind): stri
 
 function wantedInWords(kind: UnitKind): string {
   if (kind === 'dimensionless') return 'a plain number is wanted here';
-  return `${kindInWords[kind]} is wanted here: say ${choices(kind)}`;
+  return `a ${kindInWords[kind]} is wanted here: say ${choices(kind)}`;
 }
 
 function ambiguity(numberText: string): string {

@@ -12,7 +12,8 @@ export function cellAt(noise: SurfaceNoise, x: number, y: number): Cell {
   const iy = Math.floor(y);
   let nearest = 9;
   let second = 9;
-  let own = 0;
+  let ownX = ix;
+  let ownY = iy;
   for (let cy = iy - 1; cy <= iy + 1; cy++)
     for (let cx = ix - 1; cx <= ix + 1; cx++) {
       const dx = cx + 0.5 + 0.42 * noise.speck(cx, cy) - x;
@@ -21,8 +22,9 @@ export function cellAt(noise: SurfaceNoise, x: number, y: number): Cell {
       if (distance < nearest) {
         second = nearest;
         nearest = distance;
-        own = noise.speck(cx - 3301, cy + 557);
+        ownX = cx;
+        ownY = cy;
       } else if (distance < second) second = distance;
     }
-  return { nearest, gap: second - nearest, own };
+  return { nearest, gap: second - nearest, own: noise.speck(ownX - 3301, ownY + 557) };
 }

@@ -22,7 +22,7 @@ export function drawFractureSurface(spec: FractureSurfaceSpec): FractureSurface 
   const relief = raiseRelief(noise, spec);
   const sheet = { shaded: shadeRelief(noise, spec, relief), insidePx: relief.insidePx };
   for (const other of spec.bystanders ?? [])
-    drawFlaw(noise, spec, { ...other, upUm: spec.originDepthUm - other.depthUm }, sheet);
+    drawFlaw(noise, spec, { ...other, upUm: other.depthUm - spec.originDepthUm }, sheet);
   if (spec.flaw) drawFlaw(noise, spec, { ...spec.flaw, alongUm: 0, upUm: 0 }, sheet);
   const grey = developGrey(noise, spec, sheet.shaded);
   const scaleBar = burnScaleBar(grey, spec);

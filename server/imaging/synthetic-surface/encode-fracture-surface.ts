@@ -1,4 +1,5 @@
 import { writeFile } from 'node:fs/promises';
+import type { Sharp } from 'sharp';
 import sharp from 'sharp';
 import { drawFractureSurface } from './draw-fracture-surface.ts';
 import type { FractureSurface, FractureSurfaceSpec, SurfaceTruth } from './surface-spec.ts';
@@ -30,7 +31,7 @@ export function encodeFractureSurface(
 
 const PER_INCH = 25.4;
 
-function withDensity(image: sharp.Sharp, perMm: number | undefined): sharp.Sharp {
+function withDensity(image: Sharp, perMm: number | undefined): Sharp {
   return perMm ? image.withMetadata({ density: perMm * PER_INCH }) : image;
 }
 

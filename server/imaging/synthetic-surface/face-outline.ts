@@ -8,13 +8,18 @@ export function edgeFallUm(curveRadiusUm: number | undefined, alongUm: number): 
   return curveRadiusUm - Math.sqrt(inside);
 }
 
+/** Edges waver by less than this, px: further off they need no second look. */
+const WAVER_PX = 6;
+
 /** Height above the tensile edge, px (negative below it, on the outer surface), for a place in µm from the origin. */
 export function createTensileDistance(noise: SurfaceNoise, spec: FractureSurfaceSpec) {
   const { pixelSizeUm, originDepthUm, tensileCurveRadiusUm } = spec;
   return (alongUm: number, upUm: number): number => {
+    const straight = (upUm + originDepthUm - edgeFallUm(tensileCurveRadiusUm, alongUm)) / pixelSizeUm;
+    if (Math.abs(straight) > WAVER_PX) return straight;
     const alongPx = alongUm / pixelSizeUm;
     const waver = 1.1 * noise.plane(alongPx / 46, 3.5, 1) + 0.6 * noise.plane(alongPx / 9, 5.5, 2);
-    return (upUm + originDepthUm - edgeFallUm(tensileCurveRadiusUm, alongUm)) / pixelSizeUm + waver;
+    return straight + waver * (1 - (straight / WAVER_PX) ** 2);
   };
 }
 
@@ -23,13 +28,13 @@ export function createSectionDistance(noise: SurfaceNoise, spec: FractureSurface
   const { section, pixelSizeUm, originDepthUm } = spec;
   if (!section) return () => 1e6;
   return (alongUm: number, upUm: number): number => {
-    const upPx = upUm / pixelSizeUm;
     const left = alongUm + section.leftUm;
     const right = section.rightUm - alongUm;
     const height = upUm + originDepthUm;
     const far = section.heightUm - height;
-    const straight = Math.min(left, right, far);
     const corner = (Math.min(left, right) + Math.min(height, far) - section.cornerUm) * 0.7071;
-    return Math.min(straight, corner) / pixelSizeUm + 0.7 * noise.plane(upPx / 40, alongUm / pixelSizeUm / 40, 7);
+    const straight = Math.min(left, right, far, corner) / pixelSizeUm;
+    if (Math.abs(straight) > WAVER_PX) return straight;
+    return straight + 0.7 * noise.plane(upUm / pixelSizeUm / 40, alongUm / pixelSizeUm / 40, 7);
   };
 }

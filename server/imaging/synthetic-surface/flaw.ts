@@ -3,8 +3,16 @@ import type { SurfaceNoise } from './noise.ts';
 import { smoothStep } from './noise.ts';
 import type { FractureSurfaceSpec, SyntheticFlaw, SyntheticFlawKind } from './surface-spec.ts';
 
-/** A place in a flaw: reach 1 is its outline; along and up in half-axes; grainX, grainY in texture units of the flaw. */
-type Place = { reach: number; along: number; up: number; angle: number; noise: SurfaceNoise; ground: number };
+/** A place in a flaw: reach 1 is its outline; along and up in half-axes; rim: width of a bright rim. */
+type Place = {
+  reach: number;
+  along: number;
+  up: number;
+  angle: number;
+  rim: number;
+  noise: SurfaceNoise;
+  ground: number;
+};
 
 /** How uneven each outline is; the four axis points stay exact. */
 const UNEVEN: Record<SyntheticFlawKind, number> = {
@@ -24,12 +32,12 @@ export function flawOutline(noise: SurfaceNoise, kind: SyntheticFlawKind, angle:
   return 1 + free * UNEVEN[kind] * (noise.ring(turn * 8, 0.5, 8, 121) + 0.5 * noise.ring(turn * 32, 0.5, 32, 122));
 }
 
-function poreGrey({ reach, along, up, angle, noise, ground }: Place): number {
+function poreGrey({ reach, along, up, angle, rim: width, noise, ground }: Place): number {
   const cell = cellAt(noise, along * 7, up * 7);
   const facing = 16 * cell.own + 34 * (0.45 - cell.nearest) + 10 * noise.plane(along * 17, up * 17, 130);
   const floor =
     18 + smoothStep(0.2, 1, reach) * (22 + facing) + 46 * smoothStep(0.5, 0.96, reach) * smoothStep(-0.1, 0.9, -up);
-  const rim = 58 * Math.exp(-(((reach - 1.03) / 0.045) ** 2)) * (0.65 + 0.35 * Math.sin(angle + 0.6));
+  const rim = 58 * Math.exp(-(((reach - 1 - 0.6 * width) / width) ** 2)) * (0.65 + 0.35 * Math.sin(angle + 0.6));
   const inner = 1 - smoothStep(0.93, 1.02, reach);
   return ground * (1 - inner) + floor * inner + rim;
 }
@@ -49,12 +57,12 @@ function agglomerateGrey({ reach, along, up, noise, ground }: Place): number {
   return ground * (1 - inner) + (cluster - 70 * loose) * inner - parting;
 }
 
-function crackGrey({ reach, along, up, noise, ground }: Place): number {
+function crackGrey({ reach, along, up, rim, noise, ground }: Place): number {
   const plates = cellAt(noise, along * 9 + 0.4 * noise.plane(along * 6, up * 6, 141), up * 7);
   const texture = 16 * plates.own + 11 * noise.plane(along * 22, up * 15, 142) - 26 * Math.exp(-plates.gap * 9);
   const inner = 1 - smoothStep(0.95, 1.02, reach);
   const floor = 84 + texture + 0.35 * (ground - 112) - 22 * smoothStep(0.6, 1, reach);
-  return ground * (1 - inner) + floor * inner + 44 * Math.exp(-(((reach - 1.02) / 0.024) ** 2));
+  return ground * (1 - inner) + floor * inner + 44 * Math.exp(-(((reach - 1 - 0.6 * rim) / (0.6 * rim)) ** 2));
 }
 
 /** Several short cracks side by side, joined by steps that run in from the ground surface. */
@@ -68,10 +76,11 @@ function grindingGrey(place: Place): number {
 }
 
 /** Conchoidal hollow: smooth, with ribs round the place of contact and a sharp dark rim. */
-function chipGrey({ reach, along, up, noise, ground }: Place): number {
+function chipGrey({ reach, along, up, rim, noise, ground }: Place): number {
   const fromContact = Math.sqrt((along + 0.35) ** 2 + (up + 0.12) ** 2) + 0.03 * noise.plane(along * 3, up * 3, 161);
-  const rib = fromContact * 7 - Math.floor(fromContact * 7);
-  const ribs = 34 * Math.exp(-((rib - 0.5) ** 2) * 30) - 10;
+  const wave = 6.5 * Math.sqrt(fromContact) + 0.35 * noise.plane(along * 1.5, up * 1.5, 164);
+  const rib = wave - Math.floor(wave);
+  const ribs = (9 + 9 * noise.plane(along * 2 + 7, up * 2, 165)) * Math.sin(2 * Math.PI * rib);
   const rays =
     15 * noise.plane(Math.atan2(up + 0.12, along + 0.35) * 14, fromContact * 2, 162) * smoothStep(0.3, 1, fromContact);
   const crushed = 60 * smoothStep(0.36, 0.1, fromContact) * (0.5 + 0.8 * noise.plane(along * 26, up * 26, 163));
@@ -80,7 +89,7 @@ function chipGrey({ reach, along, up, noise, ground }: Place): number {
   return (
     ground * (1 - inner) +
     floor * inner +
-    48 * Math.exp(-(((reach - 1.02) / 0.026) ** 2)) -
+    48 * Math.exp(-(((reach - 1 - 0.6 * rim) / (0.7 * rim)) ** 2)) -
     40 * Math.exp(-(((reach - 0.96) / 0.03) ** 2))
   );
 }
@@ -138,6 +147,7 @@ export function drawFlaw(
       const reach = Math.hypot(along, up) / flawOutline(noise, flaw.kind, angle);
       if (reach > 1.3) continue;
       const ground = sheet.shaded[k] ?? 0;
-      sheet.shaded[k] = ground + cover * (greyOf({ reach, along, up, angle, noise, ground }) - ground);
+      const rim = Math.min(0.045, 5 / halfY);
+      sheet.shaded[k] = ground + cover * (greyOf({ reach, along, up, angle, rim, noise, ground }) - ground);
     }
 }

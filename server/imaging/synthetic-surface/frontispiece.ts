@@ -24,6 +24,6 @@ export async function writeFrontispiece(path: string): Promise<void> {
   await sharp(grey, { raw: { width: widthPx, height: heightPx, channels: 1 } })
     // detector noise costs bytes and shows nothing at this size
     .blur(0.7)
-    .webp({ quality: 34, effort: 6 })
+    .webp({ quality: 50, effort: 6 })
     .toFile(path);
 }

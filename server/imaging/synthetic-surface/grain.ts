@@ -6,6 +6,9 @@ export type GrainSlopes = {
   /** Steepness it gains in the mist and beyond. */ rough: number;
 };
 
+/** Waves lower than this, px, change no grey. */
+const UNSEEN_PX = 0.012;
+
 type Octave = { cosPerUm: number; sinPerUm: number; calmPx: number; roughPx: number; layer: number };
 
 /**
@@ -21,7 +24,7 @@ export function createGrain(noise: SurfaceNoise, pixelSizeUm: number, slopesAt: 
     const wavePx = 2 ** k / pixelSizeUm;
     const { calm, rough } = slopesAt(wavePx);
     const seen = wavePx * smoothStep(1.6, 2.6, wavePx);
-    if ((calm + rough) * seen > 0.004)
+    if ((calm + rough) * seen > UNSEEN_PX)
       // each octave turned by another angle, or the lattices would add up to a grid
       octaves.push({
         cosPerUm: Math.cos(k * 1.1 + 0.5) * 2 ** -k,
@@ -34,9 +37,11 @@ export function createGrain(noise: SurfaceNoise, pixelSizeUm: number, slopesAt: 
   return (alongUm: number, depthUm: number, roughShare: number): number => {
     let height = 0;
     for (const { cosPerUm, sinPerUm, calmPx, roughPx, layer } of octaves) {
+      const size = calmPx + roughShare * roughPx;
+      if (size < UNSEEN_PX) continue;
       const x = alongUm * cosPerUm - depthUm * sinPerUm;
       const y = alongUm * sinPerUm + depthUm * cosPerUm;
-      height += (calmPx + roughShare * roughPx) * noise.plane(x, y, layer);
+      height += size * noise.plane(x, y, layer);
     }
     return height;
   };

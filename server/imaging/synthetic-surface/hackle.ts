@@ -4,12 +4,12 @@ import { smoothStep } from './noise.ts';
 const FULL_TURN = 2 * Math.PI;
 
 /** Ridges of a mirror radius at the boundary, and how fast they widen: spacing ~ radius to this power. */
-const SPACING_AT_MIRROR = 0.045;
-const WIDENING = 0.62;
-const FINEST_PX = 5;
+const SPACING_AT_MIRROR = 0.024;
+const WIDENING = 0.55;
+const FINEST_PX = 4.5;
 
 /** Streaks are this many times longer than wide: broad, middle, fine. */
-const STRETCH = [11, 7, 4] as const;
+const STRETCH = [14, 9, 5] as const;
 
 /** Pointed crests on low ground. */
 const crest = (n: number) => (n > 0 ? n * Math.sqrt(n) : 0);
@@ -17,17 +17,20 @@ const crest = (n: number) => (n > 0 ? n * Math.sqrt(n) : 0);
 /**
  * Radial ridges that widen outward, as height in px.
  *
- * turn: 1 to 2 round the origin; logRadius: natural logarithm of radius over reference radius.
+ * turn: 1 to 2 round the origin; logRadius: natural logarithm of radiusPx over the reference radius.
  * Ridge counts round the turn are powers of two, so the same ridges stand at every magnification.
  */
 export function createHackle(noise: SurfaceNoise, referenceRadiusPx: number) {
   const logReference = Math.log(referenceRadiusPx);
-  return (turn: number, logRadius: number): number => {
-    const logSpacing = Math.max(Math.log(FINEST_PX), logReference + Math.log(SPACING_AT_MIRROR) + WIDENING * logRadius);
-    const level = Math.max(3, (logReference + logRadius + Math.log(FULL_TURN) - logSpacing) / Math.LN2);
+  const logFinest = Math.log(FINEST_PX);
+  const logSpacingAtMirror = logReference + Math.log(SPACING_AT_MIRROR);
+  const logTurnAtMirror = logReference + Math.log(FULL_TURN);
+  return (turn: number, logRadius: number, radiusPx: number): number => {
+    const logSpacing = Math.max(logFinest, logSpacingAtMirror + WIDENING * logRadius);
+    const level = Math.max(3, (logTurnAtMirror + logRadius - logSpacing) / Math.LN2);
     const lower = Math.floor(level);
     const share = smoothStep(0.3, 0.7, level - lower);
-    const turnPx = FULL_TURN * Math.exp(logReference + logRadius);
+    const turnPx = FULL_TURN * radiusPx;
     let height = 0;
     for (let step = 0; step < 2; step++) {
       const weight = step === 0 ? 1 - share : share;

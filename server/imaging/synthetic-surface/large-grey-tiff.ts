@@ -12,7 +12,7 @@ const MIDDLE_GREY = 112;
 function drawSheets({ widthPx, heightPx, seed }: LargeGreySize): { broad: Sheet; close: Sheet } {
   const broadWidth = Math.min(1400, widthPx);
   const broadHeight = Math.max(1, Math.round((broadWidth * heightPx) / widthPx));
-  const common = { originDepthUm: 0, scaleBarUm: null, body: 'fine', mirrorRadiusUm: 300 } as const;
+  const common = { originDepthUm: 0, scaleBarUm: null, body: 'fine' } as const;
   const broad = drawFractureSurface({
     ...common,
     seed,
@@ -21,6 +21,7 @@ function drawSheets({ widthPx, heightPx, seed }: LargeGreySize): { broad: Sheet;
     pixelSizeUm: 1,
     origin: { xPx: broadWidth / 2, yPx: broadHeight * 0.9 },
     flaw: { kind: 'pore', halfAxisDepthUm: 40, halfAxisAlongUm: 46 },
+    mirrorRadiusUm: 300,
   });
   const close = drawFractureSurface({
     ...common,
@@ -30,6 +31,8 @@ function drawSheets({ widthPx, heightPx, seed }: LargeGreySize): { broad: Sheet;
     pixelSizeUm: 1,
     origin: { xPx: 512, yPx: 2600 },
     flaw: null,
+    // all mirror: grain without direction can be turned over unseen
+    mirrorRadiusUm: 1e5,
   });
   return { broad, close };
 }
@@ -76,7 +79,7 @@ export async function writeLargeGreyTiff(size: LargeGreySize, path: string): Pro
       const broadGrey = start + ((row[left + 1] ?? 0) - start) * (at - left);
       const detail = (close.grey[tileRow + foldedPlace(i, close.widthPx)] ?? MIDDLE_GREY) - MIDDLE_GREY;
       // dark places (outer surface, pore) keep less of the texture
-      grey[j * widthPx + i] = Math.min(250, Math.max(2, broadGrey + lift + detail * (broadGrey / 220)));
+      grey[j * widthPx + i] = Math.min(250, Math.max(2, broadGrey + lift + detail * (broadGrey / 130)));
     }
   }
   await sharp(grey, { raw: { width: widthPx, height: heightPx, channels: 1 }, limitInputPixels: false })

@@ -1,4 +1,5 @@
 import { createTensileDistance } from './face-outline.ts';
+import { createMicrostructure } from './microstructure.ts';
 import type { SurfaceNoise } from './noise.ts';
 import { smoothStep } from './noise.ts';
 import type { Relief } from './relief.ts';
@@ -11,7 +12,7 @@ function outerGrey(noise: SurfaceNoise, spec: FractureSurfaceSpec, alongUm: numb
   const alongPx = alongUm / spec.pixelSizeUm;
   const mount = 13 + 3 * noise.plane(alongPx / 60, belowPx / 60, 110);
   const within = !spec.section || (alongUm > -spec.section.leftUm && alongUm < spec.section.rightUm);
-  if (belowPx < 0 || !within) return mount;
+  if (belowPx < 0 || belowPx > 240 || !within) return mount;
   const scratches =
     13 + 9 * noise.plane(alongPx / 2.3, belowPx / 70, 111) + 6 * noise.plane(alongPx / 9, belowPx / 160, 112);
   return mount + 54 * Math.exp(-belowPx / 3.5) + scratches * Math.exp(-belowPx / 44);
@@ -30,6 +31,7 @@ export function shadeRelief(noise: SurfaceNoise, spec: FractureSurfaceSpec, reli
   const lightX = Math.cos(light);
   const lightY = -Math.sin(light);
   const tensile = createTensileDistance(noise, spec);
+  const microstructure = createMicrostructure(noise, spec);
   const at = (k: number, own: number) => ((inside[k] ?? -9) > -4 ? (height[k] ?? own) : own);
 
   for (let j = 0; j < rows; j++) {
@@ -59,8 +61,14 @@ export function shadeRelief(noise: SurfaceNoise, spec: FractureSurfaceSpec, reli
       const toward = -(slopeX * lightX + slopeY * lightY);
       const across = slopeX * lightY - slopeY * lightX;
       const hollow = west + east + north + south - 4 * own;
-      let value = TONE - 11 + (96 * toward + 36 * Math.abs(across)) / Math.sqrt(1 + 1.1 * steep2);
+      let value = TONE - 11 + (96 * toward + 44 * Math.abs(across)) / Math.sqrt(1 + 1.1 * steep2);
       value += (38 * steep2) / (0.35 + steep2) - (16 * hollow) / (1 + 0.8 * Math.abs(hollow));
+      if (microstructure)
+        value = microstructure(
+          value,
+          (i + 0.5 - origin.xPx) * pixelSizeUm * side,
+          (origin.yPx - j - 0.5) * pixelSizeUm,
+        );
       if (depth < 24) value += 44 * Math.exp(-Math.max(0, depth) / 2.6) + 10 * Math.exp(-Math.max(0, depth) / 9);
       grey[k] = value * cover + outer * (1 - cover);
     }

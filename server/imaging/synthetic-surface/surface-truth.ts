@@ -49,9 +49,10 @@ function hackleOf(spec: FractureSurfaceSpec): SurfaceTruth['hackle'] {
       xPx: spec.origin.xPx + radiusPx * Math.cos(angle),
       yPx: spec.origin.yPx - radiusPx * Math.sin(angle),
     });
-    return { from: at(inner * 1.12), to: at(inner * 1.6), directionDegrees };
+    const reach = [1.6, 1.4, 1.25, 1.15].find((ratio) => isOnFace(spec, at(inner * ratio))) ?? 0;
+    return { from: at(inner * 1.04), to: at(inner * reach), directionDegrees, reach };
   });
-  return runs.filter((run) => isOnFace(spec, run.from) && isOnFace(spec, run.to));
+  return runs.filter((run) => run.reach > 0).map(({ from, to, directionDegrees }) => ({ from, to, directionDegrees }));
 }
 
 /** What the drawn surface is known to hold, in image px and µm. */

@@ -14,8 +14,8 @@ type FrontispieceLayoutProps = {
 /** The opening leaf for whoever is not signed in: a fracture surface at the left, one column at the right. */
 export function FrontispieceLayout({ image, caption, children }: FrontispieceLayoutProps) {
   return (
-    <div className="grid min-h-screen grid-cols-2 narrow:flex narrow:flex-col">
-      <figure className="relative flex min-h-[220px] flex-col bg-plate narrow:h-[220px]">
+    <main id="content" className="grid min-h-screen grid-cols-2 narrow:flex narrow:flex-col">
+      <figure className="relative flex min-h-[220px] flex-col bg-plate narrow:h-[220px] narrow:flex-none">
         <div className="relative min-h-0 flex-1 overflow-hidden [&>*]:absolute [&>*]:inset-0 [&>*]:size-full [&>*]:object-cover [&>*]:object-[50%_100%]">
           {image}
         </div>
@@ -26,21 +26,23 @@ export function FrontispieceLayout({ image, caption, children }: FrontispieceLay
           </span>
         </figcaption>
       </figure>
-      <main id="content" className="flex items-center justify-center bg-sheet px-4 py-7">
+      <div className="flex flex-1 items-center justify-center bg-sheet px-4 py-7 narrow:items-start">
         <div className="w-full max-w-[400px]">
-          <Link
-            to="/"
-            className="flex items-center gap-3 font-serif text-[32px]/none font-semibold tracking-[-0.015em] text-ink no-underline"
-          >
-            <ProductMark size={34} />
-            Hacklebook
-          </Link>
+          <h1>
+            <Link
+              to="/"
+              className="flex items-center gap-3 font-serif text-[32px]/none font-semibold tracking-[-0.015em] text-ink no-underline"
+            >
+              <ProductMark size={34} />
+              Hacklebook
+            </Link>
+          </h1>
           <p className="mt-[9px] mb-[34px] font-serif text-[17px]/[1.4] text-ink-2 italic">
             The casebook of the fracture laboratory.
           </p>
           {children}
         </div>
-      </main>
-    </div>
+      </div>
+    </main>
   );
 }

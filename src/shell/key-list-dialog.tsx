@@ -69,7 +69,7 @@ export function KeyListDialog({ open, onOpenChange }: KeyListDialogProps) {
             <dl className="grid grid-cols-[118px_1fr] gap-x-3">
               {group.keys.map(([keys, does]) => (
                 <div key={keys} className="col-span-2 grid grid-cols-subgrid border-b border-hairline py-1">
-                  <dt className="flex flex-wrap gap-1">
+                  <dt className="flex flex-wrap items-start gap-1 pt-px">
                     {keys.split(' ').map((key) => (key === '–' ? key : <Kbd key={key}>{key}</Kbd>))}
                   </dt>
                   <dd>{does}</dd>

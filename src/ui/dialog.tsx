@@ -43,6 +43,7 @@ export function Dialog({
         <div className="dialog-ground" aria-hidden />
         <Parts.Content
           className={joinClasses('dialog', wide && 'is-wide')}
+          aria-modal
           role={irreversible ? 'alertdialog' : 'dialog'}
           onOpenAutoFocus={() => (cameFrom.current = document.activeElement)}
           onCloseAutoFocus={giveFocusBack}

@@ -1,5 +1,6 @@
 import type { Route } from './http/route.ts';
+import { markRoutes } from './features/marks/routes.ts';
 import { peopleRoutes } from './features/people/routes.ts';
 
 /** Every route of the server below /api, in one table: what is mounted is what the rights test walks. */
-export const allRoutes: readonly Route[] = [...peopleRoutes];
+export const allRoutes: readonly Route[] = [...peopleRoutes, ...markRoutes];

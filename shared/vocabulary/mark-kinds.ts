@@ -14,6 +14,8 @@ export type MarkKindRow = {
   widthScreenPx: number;
   ends: StrokeEnd;
   fewestPoints: number;
+  /** Width of a white case under the stroke, screen px, for a colour that the halo alone does not carry. */
+  casedScreenPx?: number;
 };
 
 /** One row a kind: everything that draws, lists, reads or keys a mark looks here. */
@@ -68,11 +70,42 @@ export const markKindTable = {
     ends: 'arrow',
     fewestPoints: 2,
   },
+  'wallner line': {
+    word: 'Wallner line',
+    key: 'w',
+    shape: 'chain',
+    colour: '--m-wallner',
+    dash: [9, 4, 1, 4],
+    widthScreenPx: 2,
+    ends: 'circles',
+    fewestPoints: 2,
+  },
+  'arrest line': {
+    word: 'Arrest line',
+    key: 'a',
+    shape: 'chain',
+    colour: '--m-arrest',
+    dash: [],
+    widthScreenPx: 2.4,
+    ends: 'none',
+    fewestPoints: 2,
+    casedScreenPx: 5.4,
+  },
+  'compression curl': {
+    word: 'Compression curl',
+    key: 'c',
+    shape: 'chain',
+    colour: '--m-curl',
+    dash: [4, 3],
+    widthScreenPx: 2,
+    ends: 'triangle',
+    fewestPoints: 2,
+  },
   length: {
     word: 'Length',
     key: 'l',
     shape: 'segment',
-    colour: '--m-length',
+    colour: '--m-curl',
     dash: [],
     widthScreenPx: 1.6,
     ends: 'bars',
@@ -82,7 +115,7 @@ export const markKindTable = {
     word: 'Note',
     key: 'n',
     shape: 'point',
-    colour: '--m-length',
+    colour: '--m-curl',
     dash: [],
     widthScreenPx: 2,
     ends: 'disc',

@@ -2,6 +2,7 @@ import { boolean, doublePrecision, index, integer, jsonb, pgTable, text, unique,
 import { certainties } from '../../../shared/vocabulary/certainties.ts';
 import { markKinds } from '../../../shared/vocabulary/mark-kinds.ts';
 import { mirrorBoundaries } from '../../../shared/vocabulary/mirror-boundaries.ts';
+import { measuredQuantities } from '../../../shared/vocabulary/measured-quantities.ts';
 import { originCodes } from '../../../shared/vocabulary/origin-codes.ts';
 import { id, instant } from '../columns.ts';
 import { cases } from './cases.ts';
@@ -61,12 +62,12 @@ export const measurements = pgTable(
     caseId: uuid()
       .notNull()
       .references(() => cases.id),
-    quantity: text({
-      enum: ['mirror radius', 'flaw half-axis, depth', 'flaw half-axis, along', 'depth of origin', 'length'],
-    }).notNull(),
+    quantity: text({ enum: measuredQuantities }).notNull(),
     markVersionId: uuid()
       .notNull()
       .references(() => markVersions.id),
+    /** The origin mark it was read from, as it stood; absent for what is read from the mark alone. */
+    originVersionId: uuid().references(() => markVersions.id),
     bindingId: uuid()
       .notNull()
       .references(() => calibrationBindings.id),
@@ -78,5 +79,8 @@ export const measurements = pgTable(
       .references(() => people.id),
     readAt: instant().notNull(),
   },
-  (t) => [unique('measurements_once').on(t.markVersionId, t.bindingId, t.quantity), index().on(t.caseId)],
+  (t) => [
+    unique('measurements_once').on(t.markVersionId, t.bindingId, t.quantity, t.originVersionId).nullsNotDistinct(),
+    index().on(t.caseId),
+  ],
 );

@@ -59,7 +59,7 @@ function agglomerateGrey({ reach, along, up, noise, ground }: Place): number {
 
 function crackGrey({ reach, along, up, rim, noise, ground }: Place): number {
   const plates = cellAt(noise, along * 9 + 0.4 * noise.plane(along * 6, up * 6, 141), up * 7);
-  const texture = 16 * plates.own + 11 * noise.plane(along * 22, up * 15, 142) - 26 * Math.exp(-plates.gap * 9);
+  const texture = 8 * plates.own + 13 * noise.plane(along * 22, up * 15, 142) - 9 * Math.exp(-plates.gap * 9);
   const inner = 1 - smoothStep(0.95, 1.02, reach);
   const floor = 84 + texture + 0.35 * (ground - 112) - 22 * smoothStep(0.6, 1, reach);
   return ground * (1 - inner) + floor * inner + 44 * Math.exp(-(((reach - 1 - 0.6 * rim) / (0.6 * rim)) ** 2));

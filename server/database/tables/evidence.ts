@@ -47,7 +47,10 @@ export const fragments = pgTable(
     missingReason: text(),
     originLies: text({ enum: originLies }),
     massG: doublePrecision(),
+    /** U (k = 2) of the mass, g. */
     massUncertaintyG: doublePrecision(),
+    /** As it was typed: 6.412 kg ± 5 g. */
+    massEntered: text(),
     place: text().notNull(),
     holder: text().notNull(),
     condition: text(),

@@ -6,6 +6,7 @@ const length: QuantityWanted = { kind: 'length', openUnit: true };
 const force: QuantityWanted = { kind: 'force', openUnit: true };
 const stress: QuantityWanted = { kind: 'stress', openUnit: true };
 const toughness: QuantityWanted = { kind: 'toughness', openUnit: true };
+const mass: QuantityWanted = { kind: 'mass', openUnit: true };
 const factor: QuantityWanted = { kind: 'dimensionless', openUnit: false };
 
 function valueOf(text: string, wanted: QuantityWanted): number {
@@ -56,6 +57,9 @@ describe('a typed quantity', () => {
     ['1 ksi√in', toughness, 1.0988435],
     // 1 N/mm^1.5 = 1 MPa√mm = √0.001 MPa√m
     ['100 N/mm^1.5', toughness, 3.1622777],
+    ['6.412 kg', mass, 6412],
+    ['11,8 g', mass, 11.8],
+    ['250mg', mass, 0.25],
     ['1.29', factor, 1.29],
     ['5 %', factor, 0.05],
   ])('%s is read', (text, wanted, value) => {
@@ -83,6 +87,8 @@ describe('a typed quantity is refused with the reason', () => {
     ['50 psi', length, 'psi is a unit of stress, and a length is wanted here: say mm, µm, nm, cm, m, in or mil.'],
     ['4 lb', length, 'lb is a unit of mass, and a length is wanted here: say mm, µm, nm, cm, m, in or mil.'],
     ['4 mPa', stress, '“mPa” is not a unit known here: say MPa, Pa, kPa, GPa, psi, ksi, bar or kgf/mm².'],
+    ['4 lb', mass, '“lb” is not a unit known here: say g, kg or mg.'],
+    ['4 N', mass, 'N is a unit of force, and a mass is wanted here: say g, kg or mg.'],
     ['4 mm', factor, 'mm is a unit of length, and a plain number is wanted here.'],
     ['1.2.3 mm', length, '“1.2.3” is not a number that can be read.'],
     ['3 1/4 in', length, '“3 1” is not a number that can be read.'],
@@ -104,7 +110,7 @@ describe('the table of units', () => {
   });
 
   it('holds our own unit of each kind with factor 1', () => {
-    for (const kind of ['length', 'force', 'stress', 'toughness', 'dimensionless']) {
+    for (const kind of ['length', 'force', 'stress', 'toughness', 'mass', 'dimensionless']) {
       expect(unitTable.find((unit) => unit.kind === kind)?.factor).toBe(1);
     }
   });

@@ -25,6 +25,7 @@ const kindInWords: Readonly<Record<UnitKind, string>> = {
   force: 'force',
   stress: 'stress',
   toughness: 'toughness',
+  mass: 'mass',
   dimensionless: 'plain ratio',
 };
 
@@ -63,7 +64,7 @@ export function parseQuantity(text: string, wanted: QuantityWanted): QuantityRea
 function unitFor(unitText: string, numberText: string, wanted: QuantityWanted): Unit | QuantityRefused {
   if (unitText === '') return bareUnit(numberText, wanted);
   const forceUnit = forceMeant[unitText.toLowerCase()];
-  if (forceUnit) return refused(massForForce(unitText, forceUnit, wanted.kind));
+  if (forceUnit && wanted.kind !== 'mass') return refused(massForForce(unitText, forceUnit, wanted.kind));
   const unit = findUnit(unitText);
   if (!unit) return refused(`“${unitText}” is not a unit known here: say ${choices(wanted.kind)}.`);
   if (unit.kind !== wanted.kind) {

@@ -68,6 +68,10 @@ export const unitTable: readonly Unit[] = [
     spellings: ['N/mm^1.5', 'N/mm1.5', 'N/mm^(3/2)', 'N/mm^3/2', 'N mm^-1.5', ...rootSpellings('MPa', 'mm')],
   },
 
+  { name: 'g', kind: 'mass', factor: 1, spellings: ['g', 'gram', 'grams', 'gramme'] },
+  { name: 'kg', kind: 'mass', factor: 1000, spellings: ['kg', 'KG', 'Kg', 'kilogram', 'kilograms'] },
+  { name: 'mg', kind: 'mass', factor: 1e-3, spellings: ['mg', 'milligram', 'milligrams'] },
+
   { name: '1', kind: 'dimensionless', factor: 1, spellings: ['1'] },
   { name: '%', kind: 'dimensionless', factor: 0.01, spellings: ['%'] },
 ];

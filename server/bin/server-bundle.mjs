@@ -11,8 +11,8 @@ function workerFiles(folder) {
 
 /** main.ts and every worker, each a file of its own in one flat folder, so that `./x.js` finds a worker. */
 function entryPoints() {
-  const jobs = inProject('server', 'jobs');
-  const paths = [inProject('server', 'main.ts'), ...(existsSync(jobs) ? workerFiles(jobs) : [])];
+  const rooms = [inProject('server', 'jobs'), inProject('server', 'imaging')];
+  const paths = [inProject('server', 'main.ts'), ...rooms.filter((room) => existsSync(room)).flatMap(workerFiles)];
   return Object.fromEntries(paths.map((path) => [basename(path, '.ts'), path]));
 }
 

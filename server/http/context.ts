@@ -6,13 +6,19 @@ import type { Database, Reader, Transaction } from '../database/connection.ts';
 import type { Storage } from '../storage/storage.ts';
 import { Problem } from './problem.ts';
 
+/** What this installation takes at most. */
+export type Limits = { readonly largestFileBytes: number; readonly largestImagePx: number };
+
 /** What a service works with: who asks, where to read, how to write. It knows no request, session or wall clock. */
 export type Context = {
   readonly person: Person;
   readonly reader: Reader;
   readonly storage: Storage;
+  readonly limits: Limits;
   /** Runs one act. With an act id from the client, a second run of the same act is refused as already done. */
   inTransaction<Done>(work: (tx: Transaction) => Promise<Done>): Promise<Done>;
+  /** Writes what stands whatever becomes of the act itself: a counted try, a sign-in. It claims no act id. */
+  besideAct<Done>(work: (tx: Transaction) => Promise<Done>): Promise<Done>;
 };
 
 /** The same for someone not signed in, or for the server's own jobs. */
@@ -21,6 +27,7 @@ export type VisitorContext = Omit<Context, 'person'> & { readonly person: Person
 export type ContextParts = {
   database: Database;
   storage: Storage;
+  limits: Limits;
   /** Stands in for the database clock, in the demo and in tests. */
   clock?: () => Date;
   actId?: string | null;
@@ -33,17 +40,19 @@ export function contextFor(person: Person, parts: ContextParts): Context {
 
 /** Makes the context of a visitor or, with no person, of the server itself. */
 export function visitorContext(parts: ContextParts, person: Person | null = null): VisitorContext {
+  const run = <Done>(work: (tx: Transaction) => Promise<Done>, actId: string | null) =>
+    parts.database.db.transaction(async (db) => {
+      const at = parts.clock ? parts.clock() : await databaseNow({ db });
+      const tx: Transaction = { db, at };
+      if (actId && person) await claimAct(tx, actId, person.id);
+      return work(tx);
+    });
   return {
     person,
     reader: { db: parts.database.db },
     storage: parts.storage,
-    inTransaction: (work) =>
-      parts.database.db.transaction(async (db) => {
-        const at = parts.clock ? parts.clock() : await databaseNow({ db });
-        const tx: Transaction = { db, at };
-        if (parts.actId && person) await claimAct(tx, parts.actId, person.id);
-        return work(tx);
-      }),
+    inTransaction: (work) => run(work, parts.actId ?? null),
+    besideAct: (work) => run(work, null),
   };
 }
 

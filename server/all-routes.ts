@@ -1,7 +1,8 @@
 import type { Route } from './http/route.ts';
 import { evidenceRoutes } from './features/evidence/routes.ts';
+import { laboratoryRoutes } from './features/laboratory/routes.ts';
 import { markRoutes } from './features/marks/routes.ts';
 import { peopleRoutes } from './features/people/routes.ts';
 
 /** Every route of the server below /api, in one table: what is mounted is what the rights test walks. */
-export const allRoutes: readonly Route[] = [...peopleRoutes, ...evidenceRoutes, ...markRoutes];
+export const allRoutes: readonly Route[] = [...peopleRoutes, ...laboratoryRoutes, ...evidenceRoutes, ...markRoutes];

@@ -4,6 +4,7 @@ import type { Logger } from 'pino';
 import { pinoHttp } from 'pino-http';
 import { answerProblem } from './http/answer-problem.ts';
 import type { ContextParts } from './http/context.ts';
+import { limitTries } from './http/limit-tries.ts';
 import { mountRoutes } from './http/mount.ts';
 import { Problem } from './http/problem.ts';
 import { refuseForgedRequests, sessionLayers } from './http/session.ts';
@@ -30,6 +31,7 @@ export function makeApp(parts: ContextParts, settings: Settings, log: Logger) {
     }),
   );
   app.use(helmet(contentPolicy(settings)));
+  app.use(['/api/session', '/api/invitations', '/api/password-links', '/api/me/password'], limitTries());
   app.use('/api', express.json({ limit: '1mb' }), ...sessions, refuseForgedRequests, mountRoutes(allRoutes, parts));
   app.use('/api/{*rest}', () => {
     throw new Problem('not-found', 'Nothing here under this address.');

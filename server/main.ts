@@ -1,4 +1,5 @@
 import { visitorContext } from './http/context.ts';
+import { inviteFirstAdministrator } from './database/first-administrator.ts';
 import { seedDemo } from './database/seed.ts';
 import { readSettings } from './settings.ts';
 import { startServer } from './start-server.ts';
@@ -12,7 +13,10 @@ async function main(): Promise<void> {
       void server.stop().then(() => process.exit(0));
     });
   }
-  const accounts = settings.demo ? await seedDemo(server.parts, visitorContext(server.parts)) : [];
+  const context = visitorContext(server.parts);
+  const accounts = settings.demo
+    ? await seedDemo(server.parts, context)
+    : await inviteFirstAdministrator(context, { ...settings, address: server.address });
   process.stdout.write(`Hacklebook is at ${server.address}\n`);
   for (const line of accounts) process.stdout.write(`  ${line}\n`);
 }

@@ -14,6 +14,14 @@ const Environment = z.object({
   HACKLEBOOK_HTTPS: yes.default(false),
   HACKLEBOOK_TRUST_PROXY: z.coerce.number().int().min(0).default(0),
   HACKLEBOOK_DEMO: yes.default(true),
+  HACKLEBOOK_FIRST_ADMINISTRATOR: z
+    .string()
+    .regex(
+      /^[^<>]+<[^<>@\s]+@[^<>@\s]+>$/,
+      'HACKLEBOOK_FIRST_ADMINISTRATOR reads like: Ada Example <ada@laboratory.example>',
+    )
+    .optional(),
+  HACKLEBOOK_LABORATORY: z.string().trim().min(1).max(120).default('The laboratory'),
   HACKLEBOOK_LARGEST_FILE_MB: z.coerce.number().positive().default(1024),
   HACKLEBOOK_LARGEST_IMAGE_MPX: z.coerce.number().positive().default(500),
   HACKLEBOOK_ZONE: z.string().default('Europe/London'),
@@ -40,6 +48,8 @@ export function readSettings(environment: NodeJS.ProcessEnv) {
     secureCookies: e.HACKLEBOOK_HTTPS,
     trustProxy: e.HACKLEBOOK_TRUST_PROXY,
     demo: e.HACKLEBOOK_DEMO,
+    firstAdministrator: e.HACKLEBOOK_FIRST_ADMINISTRATOR,
+    laboratoryName: e.HACKLEBOOK_LABORATORY,
     largestFileBytes: e.HACKLEBOOK_LARGEST_FILE_MB * 1024 * 1024,
     largestImagePx: e.HACKLEBOOK_LARGEST_IMAGE_MPX * 1_000_000,
     zone: e.HACKLEBOOK_ZONE,

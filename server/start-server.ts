@@ -12,6 +12,7 @@ import { servePages, servePagesLive } from './http/serve-pages.ts';
 import { acceptUpgrades } from './http/upgrades.ts';
 import { openSockets } from './open-sockets.ts';
 import { runJobs } from './jobs/run-jobs.ts';
+import { sendWaiting } from './mail/send-mail.ts';
 import type { Settings } from './settings.ts';
 import { localFolderStorage } from './storage/local-folder.ts';
 
@@ -37,11 +38,13 @@ export async function startServer(settings: Settings, options: StartOptions = {}
   app.use(answerProblem);
   const sockets = await openSockets(parts, settings, log);
   const upgrades = acceptUpgrades(server, sessions, sockets.handlers);
-  const jobs = await runJobs(database, visitorContext(parts), allTasks, log);
   await new Promise<void>((done, fail) => {
     server.once('error', fail);
     server.listen(settings.port, settings.host, done);
   });
+  const address = settings.address ?? addressOf(server.address(), settings.host);
+  const jobs = await runJobs(database, visitorContext(parts), allTasks({ ...settings, address }), log);
+  await sendWaiting(visitorContext(parts));
   const stop = async () => {
     upgrades.stop();
     await sockets.stop();
@@ -51,7 +54,7 @@ export async function startServer(settings: Settings, options: StartOptions = {}
     await jobs.stop();
     await database.pool.end();
   };
-  return { address: settings.address ?? addressOf(server.address(), settings.host), parts, stop };
+  return { address, parts, stop };
 }
 
 async function putPagesOn(app: Express, server: Server, settings: Settings) {
@@ -61,7 +64,9 @@ async function putPagesOn(app: Express, server: Server, settings: Settings) {
 }
 
 function addressOf(bound: AddressInfo | string | null, host: string): string {
-  return typeof bound === 'object' && bound ? `http://${host}:${bound.port}` : String(bound);
+  // A server that listens on every interface is reached on this machine under its own name.
+  const reached = host === '0.0.0.0' || host === '::' ? 'localhost' : host;
+  return typeof bound === 'object' && bound ? `http://${reached}:${bound.port}` : String(bound);
 }
 
 function clientFolder(): string {

@@ -51,6 +51,7 @@ export function visitorContext(parts: ContextParts, person: Person | null = null
     person,
     reader: { db: parts.database.db },
     storage: parts.storage,
+    limits: parts.limits,
     inTransaction: (work) => run(work, parts.actId ?? null),
     besideAct: (work) => run(work, null),
   };

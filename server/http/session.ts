@@ -1,8 +1,9 @@
 import connectPgSimple from 'connect-pg-simple';
 import { csrfSync } from 'csrf-sync';
-import type { Request, RequestHandler } from 'express';
+import type { Request, RequestHandler, Response } from 'express';
 import session from 'express-session';
 import passport from 'passport';
+import { Strategy as LocalStrategy } from 'passport-local';
 import type { Person } from '#shared/contracts/people.ts';
 import type { Database } from '../database/connection.ts';
 
@@ -14,6 +15,11 @@ export type SessionSettings = {
   secureCookies: boolean;
   findPerson(id: string): Promise<Person | null>;
 };
+
+type Authenticator = InstanceType<typeof passport.Passport>;
+
+// Which server's sessions a request belongs to; several servers run in one process under test.
+const authenticators = new WeakMap<Request, Authenticator>();
 
 /** Sessions kept in PostgreSQL, and who is behind each, read afresh at every request. */
 export function sessionLayers(database: Database, settings: SessionSettings): RequestHandler[] {
@@ -37,7 +43,50 @@ export function sessionLayers(database: Database, settings: SessionSettings): Re
       cookie: { httpOnly: true, sameSite: 'lax', secure: settings.secureCookies, maxAge: 16 * halfHour, path: '/' },
     }),
     authenticator.session(),
+    (request, _response, next) => {
+      authenticators.set(request, authenticator);
+      next();
+    },
   ];
+}
+
+export type Tried = { mail: string; password: string };
+
+/** Signs in with the address and password of the request's body, as `check` finds them; @throws what `check` throws */
+export async function signInLocally(
+  request: Request,
+  response: Response,
+  check: (tried: Tried) => Promise<Person>,
+): Promise<Person> {
+  const strategy = new LocalStrategy({ usernameField: 'mail', passwordField: 'password' }, (mail, password, done) => {
+    check({ mail, password }).then(
+      (person) => done(null, person),
+      (error: unknown) => done(error),
+    );
+  });
+  const person = await new Promise<Person>((done, fail) => {
+    const settle = (error: unknown, found: Person | false | null | undefined) =>
+      error || !found ? fail(error ?? new Error('no address and password in the request')) : done(found);
+    authenticatorOf(request).authenticate(strategy, settle)(request, response, fail);
+  });
+  await beginSession(request, person);
+  return person;
+}
+
+/** Begins a new session for the person, under a new id: one known before the sign-in opens nothing after it. */
+export function beginSession(request: Request, person: Person): Promise<void> {
+  return new Promise((done, fail) => request.login(person, (error) => (error ? fail(error) : done())));
+}
+
+/** Ends this session. */
+export function endSession(request: Request): Promise<void> {
+  return new Promise((done, fail) => request.logout((error) => (error ? fail(error) : done())));
+}
+
+function authenticatorOf(request: Request): Authenticator {
+  const authenticator = authenticators.get(request);
+  if (!authenticator) throw new Error('the request did not come through the session layers');
+  return authenticator;
 }
 
 const csrf = csrfSync({

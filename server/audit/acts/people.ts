@@ -1,7 +1,9 @@
 export const peopleActs = {
   'organisation.entered': { words: 'entered an organisation' },
+  'organisation.changed': { words: 'changed an organisation' },
   'person.invited': { words: 'invited a person' },
   'person.admitted': { words: 'admitted a person' },
+  'invitation.sent-again': { words: 'sent an invitation again' },
   'invitation.taken-back': { words: 'took an invitation back' },
   'invitation.accepted': { words: 'accepted an invitation' },
   'person.changed': { words: 'changed an account' },
@@ -14,4 +16,6 @@ export const peopleActs = {
   'person.signed-out': { words: 'signed out' },
   'person.signed-out-everywhere': { words: 'signed out everywhere' },
   'sign-in.locked': { words: 'sign-in was locked after failed tries' },
+  'mail.sent-again': { words: 'sent a mail again that had come back' },
+  'held-mail.opened': { words: 'opened a mail held on this machine' },
 } as const;

@@ -1,19 +1,12 @@
-import type { OrganisationKind, Role } from '#shared/vocabulary/roles.ts';
+import type { Role } from '#shared/vocabulary/roles.ts';
 import type { VisitorContext } from '../../../http/context.ts';
 import { recordAct } from '../../../audit/record-act.ts';
-import { insertOrganisation, insertPerson } from '../queries.ts';
+import { insertPerson } from '../queries.ts';
 import { hashPassword } from './password.ts';
 
-/** Enters an organisation whose people may then be admitted. */
-export function enterOrganisation(context: VisitorContext, entry: { name: string; kind: OrganisationKind }) {
-  return context.inTransaction(async (tx) => {
-    const organisation = await insertOrganisation(tx, entry);
-    await recordAct(tx, context.person, { act: 'organisation.entered', objectId: organisation.id, after: entry });
-    return organisation;
-  });
-}
+export { enterOrganisation } from './organisations.ts';
 
-/** Admits a person with a password of their own: for the first administrator, the demo and tests. Others are invited. */
+/** Admits a person with a password of their own: for the demo and tests. Everyone else is invited. */
 export async function admitPerson(
   context: VisitorContext,
   entry: { name: string; mail: string; organisationId: string; roles: readonly Role[]; password: string },

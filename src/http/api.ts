@@ -31,15 +31,16 @@ export type Method = 'POST' | 'PUT' | 'PATCH' | 'DELETE';
 
 /**
  * Sends one act. It carries an id of its own, so that when the answer is lost and the act is sent again it is done
- * once; an act that turns out to be done already answers null. @throws Refusal
+ * once; an act that turns out to be done already answers null. Who keeps an act for
+ * later gives it the same id at every try. @throws Refusal
  */
 export async function send<Schema extends z.ZodType>(
   method: Method,
   path: string,
   body: unknown,
   schema: Schema,
+  actId: string = crypto.randomUUID(),
 ): Promise<z.output<Schema> | null> {
-  const actId = crypto.randomUUID();
   for (let attempt = 1; ; attempt += 1) {
     try {
       return await ask(method, path, body, schema, { actId });

@@ -1,5 +1,6 @@
 import { doublePrecision, index, integer, jsonb, pgTable, text, uuid } from 'drizzle-orm/pg-core';
 import { estimateLines } from '../../../shared/vocabulary/estimate-lines.ts';
+import { mirrorBoundaries } from '../../../shared/vocabulary/mirror-boundaries.ts';
 import { id, instant } from '../columns.ts';
 import { cases } from './cases.ts';
 import { people } from './people.ts';
@@ -52,6 +53,10 @@ export const estimateInputs = pgTable(
     distribution: text({ enum: ['normal', 'rectangular', 'triangular'] }).notNull(),
     enteredText: text(),
     enteredUnit: text(),
+    /** The uncertainty as it was stated: "6 %, standard"; absent where it is the reading's or the constant's own. */
+    enteredUncertainty: text(),
+    /** The edge of the mirror that a radius was read to or a mirror constant belongs to. */
+    boundary: text({ enum: mirrorBoundaries }),
     sourceKind: text({ enum: ['typed', 'measurement', 'material constant'] }).notNull(),
     sourceId: uuid(),
     sourceNote: text().notNull().default(''),

@@ -1,3 +1,4 @@
+import { fractographTasks } from './features/fractographs/tasks.ts';
 import { peopleTasks } from './features/people/tasks.ts';
 import type { TaskTable } from './jobs/run-jobs.ts';
 import { mailTasks } from './mail/tasks.ts';
@@ -8,5 +9,5 @@ export type ServingSettings = Settings & { readonly address: string };
 
 /** Every kind of job the server answers, by the name it is put down under. */
 export function allTasks(settings: ServingSettings): TaskTable {
-  return { ...mailTasks(settings), ...peopleTasks };
+  return { ...mailTasks(settings), ...peopleTasks, ...fractographTasks };
 }

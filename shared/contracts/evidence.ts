@@ -11,6 +11,10 @@ const optionalLine = z
   .max(longestLine, 'Keep it under 300 characters.')
   .nullable()
   .transform((text) => (text === '' ? null : text));
+const optionalId = z.union([z.uuid(), z.literal('').transform(() => null)], 'Choose one of the list.').nullable();
+const optionalDay = z
+  .union([z.iso.date(), z.literal('').transform(() => null)], 'Type the date as 2026-03-24.')
+  .nullable();
 const line = (whenEmpty: string) =>
   z.string().trim().min(1, whenEmpty).max(longestLine, 'Keep it under 300 characters.');
 const version = z.number().int().positive();
@@ -22,7 +26,7 @@ export const PartDetails = z.object({
   serial: optionalLine,
   drawing: optionalLine,
   maker: optionalLine,
-  materialId: z.uuid().nullable(),
+  materialId: optionalId,
   environment: optionalLine,
   temperatureC: z
     .number('Type a temperature in °C.')
@@ -41,7 +45,7 @@ const pieceLines = {
   /** As typed, value ± U (k = 2) with its unit; null while not weighed. */
   mass: optionalLine,
   condition: optionalLine,
-  receivedOn: z.iso.date('Type the date as 2026-03-24.').nullable(),
+  receivedOn: optionalDay,
 };
 
 export const PieceReceived = z
@@ -49,7 +53,7 @@ export const PieceReceived = z
     ...pieceLines,
     partId: z.uuid('Say what it is a piece of.'),
     /** The piece it was made from; null for a piece of the part as received. */
-    parentId: z.uuid().nullable(),
+    parentId: optionalId,
     way: z.enum(fragmentWays),
     place: line('Say where it is.'),
     holder: line('Say who has it.'),
@@ -61,7 +65,8 @@ export const PieceReceived = z
 export type PieceReceived = z.infer<typeof PieceReceived>;
 
 const missingReason = line('Say why it is not there.');
-const mayOriginLie = z.enum(originLies, 'Answer whether the origin may lie on it: no, not known or yes.');
+const answerWanted = 'Answer whether the origin may lie on it: no, not known or yes.';
+const mayOriginLie = z.string(answerWanted).pipe(z.enum(originLies, answerWanted));
 
 export const MissingNoted = z.object({
   partId: z.uuid('Say what it is a piece of.'),
@@ -71,17 +76,34 @@ export const MissingNoted = z.object({
 });
 export type MissingNoted = z.infer<typeof MissingNoted>;
 
-const howItIs = z.discriminatedUnion('status', [
-  z.object({ status: z.literal('missing'), missingReason, originLies: mayOriginLie }),
-  z.object({
-    status: z.enum(['present', 'consumed']),
-    place: line('Say where it is.'),
-    holder: line('Say who has it.'),
-  }),
-]);
+const Gone = z.object({ status: z.literal('missing'), missingReason, originLies: mayOriginLie });
+const Held = z.object({
+  status: z.enum(['present', 'consumed']),
+  place: line('Say where it is.'),
+  holder: line('Say who has it.'),
+});
 
 /** Carries the version that was seen when the change was begun. */
-export const PieceChange = z.object({ ...pieceLines, version }).and(howItIs);
+export const PieceChange = z
+  .object({
+    ...pieceLines,
+    version,
+    status: z.enum(fragmentStatuses),
+    missingReason: optionalLine,
+    originLies: z.string().nullable(),
+    place: optionalLine,
+    holder: optionalLine,
+  })
+  .transform((change, context) => {
+    const { status, missingReason, originLies, place, holder, ...lines } = change;
+    const how =
+      status === 'missing'
+        ? Gone.safeParse({ status, missingReason: missingReason ?? '', originLies })
+        : Held.safeParse({ status, place: place ?? '', holder: holder ?? '' });
+    if (how.success) return { ...lines, how: how.data };
+    for (const { message, path } of how.error.issues) context.addIssue({ code: 'custom', message, path: [...path] });
+    return z.NEVER;
+  });
 export type PieceChange = z.infer<typeof PieceChange>;
 
 const FaceOfPiece = z.object({ fragmentId: z.uuid('Choose a piece.'), face: z.enum(faces, 'Choose a face, A or B.') });

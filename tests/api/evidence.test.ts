@@ -143,6 +143,8 @@ describe('a piece that is not there', () => {
     const { body: found } = await people.analyst.client.put(`${at}/pieces/${missing.id}`, {
       version: missing.version,
       status: 'present',
+      missingReason: null,
+      originLies: null,
       description: noted.description,
       mass: '0.22 kg ± 2 g',
       place: 'safe S2',
@@ -172,7 +174,18 @@ describe('two people changing the same thing', () => {
     const { at, partId } = await aCaseWithPart();
     const piece = await receive(at, partId);
     const { description, place, holder, condition, receivedOn, status, version } = piece;
-    const change = { description, place, holder, condition, receivedOn, status, version, mass: null };
+    const change = {
+      description,
+      place,
+      holder,
+      condition,
+      receivedOn,
+      status,
+      version,
+      mass: null,
+      missingReason: null,
+      originLies: null,
+    };
     const [one, other] = await Promise.all([
       people.analyst.client.put(`${at}/pieces/${piece.id}`, { ...change, place: 'bench 1' }),
       people.secondAnalyst.client.put(`${at}/pieces/${piece.id}`, { ...change, place: 'bench 2' }),

@@ -29,7 +29,7 @@ export function changePiece(
       condition,
       receivedOn,
       ...massRead,
-      ...whereItIs(change),
+      ...whereItIs(change.how),
       version: before.version + 1,
     });
     const after = presentPiece(row);
@@ -44,11 +44,6 @@ export function changePiece(
   });
 }
 
-function whereItIs(change: PieceChange) {
-  if (change.status === 'missing') {
-    const { status, missingReason, originLies } = change;
-    return { status, missingReason, originLies, ...nowhere };
-  }
-  const { status, place, holder } = change;
-  return { status, place, holder, missingReason: null, originLies: null };
+function whereItIs(how: PieceChange['how']) {
+  return how.status === 'missing' ? { ...how, ...nowhere } : { ...how, missingReason: null, originLies: null };
 }

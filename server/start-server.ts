@@ -30,8 +30,8 @@ export async function startServer(settings: Settings, options: StartOptions = {}
   const database = connectDatabase(settings.databaseUrl, 20);
   await migrateDatabase(database);
   const storage = await localFolderStorage(settings.uploadsFolder);
-  const { largestFileBytes, largestImagePx } = settings;
-  const parts: ContextParts = { database, storage, limits: { largestFileBytes, largestImagePx }, clock: options.clock };
+  const { largestFileBytes, largestImagePx, zone } = settings;
+  const parts: ContextParts = { database, storage, limits: { largestFileBytes, largestImagePx }, zone, clock: options.clock };
   const { app, sessions } = makeApp(parts, settings, log);
   const server = createServer(app);
   const closePages = options.withoutPages ? undefined : await putPagesOn(app, server, settings);

@@ -15,6 +15,8 @@ export type Context = {
   readonly reader: Reader;
   readonly storage: Storage;
   readonly limits: Limits;
+  /** The laboratory's zone, as "Europe/London": for showing and for what a signature says; instants are UTC. */
+  readonly zone: string;
   /** Runs one act. With an act id from the client, a second run of the same act is refused as already done. */
   inTransaction<Done>(work: (tx: Transaction) => Promise<Done>): Promise<Done>;
   /** Writes what stands whatever becomes of the act itself: a counted try, a sign-in. It claims no act id. */
@@ -28,6 +30,7 @@ export type ContextParts = {
   database: Database;
   storage: Storage;
   limits: Limits;
+  zone?: string;
   /** Stands in for the database clock, in the demo and in tests. */
   clock?: () => Date;
   actId?: string | null;
@@ -52,6 +55,7 @@ export function visitorContext(parts: ContextParts, person: Person | null = null
     reader: { db: parts.database.db },
     storage: parts.storage,
     limits: parts.limits,
+    zone: parts.zone ?? 'UTC',
     inTransaction: (work) => run(work, parts.actId ?? null),
     besideAct: (work) => run(work, null),
   };

@@ -36,6 +36,11 @@ export async function lockCase<Act extends CaseAct>(
   return held(context.person, act, row);
 }
 
+/** A case as it stands after a change in this transaction; the right to the change was proven before it. */
+export async function rereadCase(tx: Transaction, changed: CaseRow): Promise<CaseRow> {
+  return (await lockCaseRow(tx, changed.id)) ?? changed;
+}
+
 /** Whether the person sees a case at all, by its id: the wall for records reached by their own id. */
 export async function findSeenCase(reader: Reader, person: Person, number: CaseNumber): Promise<CaseRow | null> {
   const row = await findCaseRow(reader, number);

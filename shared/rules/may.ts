@@ -76,6 +76,7 @@ export const laboratoryActTable = {
   },
   'open a case': { roles: ['analyst'], laboratory: true, words: 'open a case' },
   'read materials': { roles: ['analyst', 'manager', 'engineer'], laboratory: false, words: 'read the materials' },
+  'enter materials': { roles: ['analyst', 'engineer'], laboratory: true, words: 'enter a material' },
   'record constants': { roles: ['engineer'], laboratory: true, words: 'record a constant used in estimates' },
   'read calibrations': {
     roles: ['analyst', 'manager', 'engineer', 'administrator'],

@@ -43,6 +43,9 @@ export const cases = pgTable(
     index().on(t.organisationId, t.receivedAt.desc()),
     index().on(t.assignedTo, t.receivedAt.desc()),
     index().on(t.materialId),
+    // The order of numbers: by year, then by the place in it, which may outgrow four digits.
+    index('cases_number_order_idx').on(sql`(substr(${t.number}, 4, 4) || lpad(substr(${t.number}, 9), 8, '0'))`),
+    index('cases_title_order_idx').on(t.title, t.id),
   ],
 );
 

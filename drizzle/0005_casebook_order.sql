@@ -1,0 +1,2 @@
+CREATE INDEX "cases_number_order_idx" ON "cases" USING btree ((substr("number", 4, 4) || lpad(substr("number", 9), 8, '0')));--> statement-breakpoint
+CREATE INDEX "cases_title_order_idx" ON "cases" USING btree ("title","id");

@@ -30,6 +30,7 @@ export function problemFrom(error: unknown): Problem {
       stillHolds: 'Nothing in the case was changed.',
     });
   if (code === '23505') return new Problem('already-there', 'This exists already; nothing was written twice.');
+  if (code === '23503') return new Problem('not-valid', 'Something named here is not there any more.');
   if (hasStatus(error) && error.status === 403 && error.code === 'EBADCSRFTOKEN')
     return new Problem(
       'forged-request',

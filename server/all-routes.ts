@@ -1,6 +1,7 @@
 import type { Route } from './http/route.ts';
 import { caseRoutes } from './features/cases/routes.ts';
 import { estimateRoutes } from './features/estimates/routes.ts';
+import { closureRoutes } from './features/closure/routes.ts';
 import { evidenceRoutes } from './features/evidence/routes.ts';
 import { fractographRoutes } from './features/fractographs/routes.ts';
 import { calibrationRoutes } from './features/laboratory/routes/calibrations.ts';
@@ -20,4 +21,5 @@ export const allRoutes: readonly Route[] = [
   ...fractographRoutes,
   ...markRoutes,
   ...estimateRoutes,
+  ...closureRoutes,
 ];

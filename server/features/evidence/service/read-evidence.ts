@@ -1,4 +1,4 @@
-import type { EvidenceView, MatePairView, PieceView } from '#shared/contracts/evidence.ts';
+import type { EvidenceView, MatePairView, PartView, PieceView } from '#shared/contracts/evidence.ts';
 import { may, type CaseAct } from '#shared/rules/may.ts';
 import type { Face } from '#shared/vocabulary/pieces.ts';
 import { limitSentence } from '#shared/wording/limit-sentence.ts';
@@ -13,12 +13,17 @@ export async function readEvidence(context: Context, heldCase: HeldFor<'read'>):
   const { reader, person } = context;
   const answer = may(person, 'change evidence', factsOf(heldCase));
   return {
-    parts: (await listPartRows(reader, heldCase)).map(presentPart),
+    parts: await listParts(reader, heldCase),
     pieces: await listPieces(reader, heldCase),
     mates: await listMates(reader, heldCase),
     change: { allowed: answer.allowed, reason: answer.allowed ? null : answer.reason },
     closedAt: heldCase.closedAt?.toISOString() ?? null,
   };
+}
+
+/** What broke: the parts of the case. */
+export async function listParts(reader: Reader, heldCase: HeldFor<CaseAct>): Promise<PartView[]> {
+  return (await listPartRows(reader, heldCase)).map(presentPart);
 }
 
 /** Every piece of the case, a piece before what was made from it. */

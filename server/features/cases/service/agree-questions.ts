@@ -1,4 +1,5 @@
 import type { QuestionsAgreed } from '#shared/contracts/cases.ts';
+import type { CaseAct } from '#shared/rules/may.ts';
 import { recordAct } from '../../../audit/record-act.ts';
 import type { Reader } from '../../../database/connection.ts';
 import type { Context } from '../../../http/context.ts';
@@ -9,7 +10,7 @@ import { presentQuestions } from '../present.ts';
 import { requireSeenVersion } from './seen-version.ts';
 
 /** Every agreed version of the questions, newest first. */
-export async function listQuestions(reader: Reader, heldCase: HeldFor<'read'> | HeldFor<'edit'>) {
+export async function listQuestions(reader: Reader, heldCase: HeldFor<CaseAct>) {
   return (await listQuestionVersions(reader, heldCase.id)).map(presentQuestions);
 }
 

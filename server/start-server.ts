@@ -16,6 +16,9 @@ import { sendWaiting } from './mail/send-mail.ts';
 import type { Settings } from './settings.ts';
 import { localFolderStorage } from './storage/local-folder.ts';
 
+// A gigabyte over a slow line; what comes in is streamed away, so a slow sender holds little.
+const longestRequestMs = 2 * 60 * 60 * 1000;
+
 export type StartOptions = {
   clock?: () => Date;
   /** Leaves the pages out, where only the routes are asked. */
@@ -31,9 +34,15 @@ export async function startServer(settings: Settings, options: StartOptions = {}
   await migrateDatabase(database);
   const storage = await localFolderStorage(settings.uploadsFolder);
   const { largestFileBytes, largestImagePx, zone } = settings;
-  const parts: ContextParts = { database, storage, limits: { largestFileBytes, largestImagePx }, zone, clock: options.clock };
+  const parts: ContextParts = {
+    database,
+    storage,
+    limits: { largestFileBytes, largestImagePx },
+    zone,
+    clock: options.clock,
+  };
   const { app, sessions } = makeApp(parts, settings, log);
-  const server = createServer(app);
+  const server = createServer({ requestTimeout: longestRequestMs }, app);
   const closePages = options.withoutPages ? undefined : await putPagesOn(app, server, settings);
   app.use(answerProblem);
   const sockets = await openSockets(parts, settings, log);

@@ -22,12 +22,12 @@ const emptyResolutions = [
 export async function readPixelSizeTag(path: string, format: FileKind): Promise<PixelSizeTag | null> {
   if (format === 'TIFF' || format === 'BigTIFF') return fromTiff(path, format);
   if (format === 'PNG') return fromPng(await headOf(path));
-  if (format === 'JPEG') return fromJpeg(await headOf(path));
+  if (format === 'JPEG') return fromJpeg(path, await headOf(path));
   return null;
 }
 
-async function fromTiff(path: string, format: FileKind): Promise<PixelSizeTag | null> {
-  const tags = await readTiffScaleTags(path);
+async function fromTiff(path: string, format: FileKind, startsAt = 0): Promise<PixelSizeTag | null> {
+  const tags = await readTiffScaleTags(path, startsAt);
   if (!tags) return null;
   const described = fromDescription(tags.description ?? '', tags.xResolution);
   if (described) return described;
@@ -80,12 +80,15 @@ function fromPng(head: Buffer): PixelSizeTag | null {
   return null;
 }
 
-/** JFIF density: whole pixels in an inch or centimetre, right after the start of the file. */
-function fromJpeg(head: Buffer): PixelSizeTag | null {
-  if (head.length < 18 || head.subarray(6, 10).toString('latin1') !== 'JFIF') return null;
-  const perUnit = head.readUInt16BE(14);
-  if (head[13] === 2) return fromResolution('JPEG density', perUnit, { um: umPerCm, words: 'px/cm' });
-  return head[13] === 1 ? fromResolution('JPEG density', perUnit, { um: umPerInch, words: 'px/inch' }) : null;
+/** The resolution of a JPEG: whole pixels in a unit right after its start (JFIF), else the fraction in its Exif part. */
+async function fromJpeg(path: string, head: Buffer): Promise<PixelSizeTag | null> {
+  if (head.length >= 18 && head.subarray(6, 10).toString('latin1') === 'JFIF' && head[13] > 0) {
+    const unit = head[13] === 2 ? { um: umPerCm, words: 'px/cm' } : { um: umPerInch, words: 'px/inch' };
+    const found = fromResolution('JPEG density', head.readUInt16BE(14), unit);
+    if (found) return found;
+  }
+  const exifAt = head.subarray(0, 70_000).indexOf('Exif\0\0', 0, 'latin1');
+  return exifAt < 0 ? null : fromTiff(path, 'JPEG', exifAt + 6);
 }
 
 function fromResolution(name: string, perUnit: number, unit: { um: number; words: string }): PixelSizeTag | null {

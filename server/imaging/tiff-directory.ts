@@ -33,17 +33,19 @@ const sizeOfType: Readonly<Record<number, number>> = {
 const mostEntries = 4096;
 const longestDescription = 1_000_000;
 
+type Source = { readonly file: FileHandle; readonly startsAt: number };
 type Form = { readonly big: boolean; readonly little: boolean };
 type Entry = { readonly tag: number; readonly type: number; readonly count: number; readonly value: Buffer };
 
 /**
  * Reads the scale tags of a classic or big TIFF, either byte order, from its first directory.
  * Source: TIFF 6.0 sections 2 and 8; BigTIFF differs in 8-byte counts and offsets. A damaged directory answers null.
+ * `startsAt`: where in the file the directory's own header stands, bytes; not 0 for the Exif part of a JPEG.
  */
-export async function readTiffScaleTags(path: string): Promise<TiffScaleTags | null> {
+export async function readTiffScaleTags(path: string, startsAt = 0): Promise<TiffScaleTags | null> {
   const file = await open(path, 'r');
   try {
-    return await readDirectory(file);
+    return await readDirectory({ file, startsAt });
   } catch (error) {
     if (error instanceof RangeError) return null;
     throw error;
@@ -52,27 +54,27 @@ export async function readTiffScaleTags(path: string): Promise<TiffScaleTags | n
   }
 }
 
-async function readDirectory(file: FileHandle): Promise<TiffScaleTags> {
-  const head = await bytesAt(file, 0, 16);
+async function readDirectory(source: Source): Promise<TiffScaleTags> {
+  const head = await bytesAt(source, 0, 16);
   const form: Form = { little: head[0] === 0x49, big: uint(head, 2, 2, head[0] === 0x49) === 43 };
   const first = form.big ? uint(head, 8, 8, form.little) : uint(head, 4, 4, form.little);
-  const entries = await listEntries(file, form, first);
+  const entries = await listEntries(source, form, first);
   const find = (tag: number) => entries.find((entry) => entry.tag === tag);
   const unit = find(tags.resolutionUnit);
   return {
-    xResolution: await rationalOf(file, form, find(tags.xResolution)),
-    yResolution: await rationalOf(file, form, find(tags.yResolution)),
+    xResolution: await rationalOf(source, form, find(tags.xResolution)),
+    yResolution: await rationalOf(source, form, find(tags.yResolution)),
     resolutionUnit: unit ? uint(unit.value, 0, 2, form.little) : 2,
-    description: await textOf(file, form, find(tags.description)),
+    description: await textOf(source, form, find(tags.description)),
   };
 }
 
-async function listEntries(file: FileHandle, form: Form, offset: number): Promise<Entry[]> {
+async function listEntries(source: Source, form: Form, offset: number): Promise<Entry[]> {
   const countSize = form.big ? 8 : 2;
   const entrySize = form.big ? 20 : 12;
-  const count = uint(await bytesAt(file, offset, countSize), 0, countSize, form.little);
+  const count = uint(await bytesAt(source, offset, countSize), 0, countSize, form.little);
   if (count > mostEntries) throw new RangeError('too many entries');
-  const bytes = await bytesAt(file, offset + countSize, count * entrySize);
+  const bytes = await bytesAt(source, offset + countSize, count * entrySize);
   return Array.from({ length: count }, (_, index) => {
     const entry = bytes.subarray(index * entrySize, (index + 1) * entrySize);
     return {
@@ -85,23 +87,23 @@ async function listEntries(file: FileHandle, form: Form, offset: number): Promis
 }
 
 /** The bytes of an entry: in the entry itself where they fit, else where it points. */
-async function valueOf(file: FileHandle, form: Form, entry: Entry): Promise<Buffer> {
+async function valueOf(source: Source, form: Form, entry: Entry): Promise<Buffer> {
   const size = (sizeOfType[entry.type] ?? 1) * entry.count;
   if (size > longestDescription) throw new RangeError('too long');
   if (size <= entry.value.length) return entry.value.subarray(0, size);
-  return bytesAt(file, uint(entry.value, 0, entry.value.length, form.little), size);
+  return bytesAt(source, uint(entry.value, 0, entry.value.length, form.little), size);
 }
 
-async function rationalOf(file: FileHandle, form: Form, entry: Entry | undefined): Promise<number | undefined> {
+async function rationalOf(source: Source, form: Form, entry: Entry | undefined): Promise<number | undefined> {
   if (!entry || entry.type !== 5 || entry.count < 1) return undefined;
-  const bytes = await valueOf(file, form, entry);
+  const bytes = await valueOf(source, form, entry);
   const below = uint(bytes, 4, 4, form.little);
   return below === 0 ? undefined : uint(bytes, 0, 4, form.little) / below;
 }
 
-async function textOf(file: FileHandle, form: Form, entry: Entry | undefined): Promise<string | undefined> {
+async function textOf(source: Source, form: Form, entry: Entry | undefined): Promise<string | undefined> {
   if (!entry || entry.type !== 2) return undefined;
-  return (await valueOf(file, form, entry)).toString('utf8').replace(/\0+$/, '');
+  return (await valueOf(source, form, entry)).toString('utf8').replace(/\0+$/, '');
 }
 
 function uint(bytes: Buffer, offset: number, size: number, little: boolean): number {
@@ -109,8 +111,8 @@ function uint(bytes: Buffer, offset: number, size: number, little: boolean): num
   return little ? bytes.readUIntLE(offset, size) : bytes.readUIntBE(offset, size);
 }
 
-async function bytesAt(file: FileHandle, position: number, size: number): Promise<Buffer> {
-  const { bytesRead, buffer } = await file.read(Buffer.alloc(size), 0, size, position);
+async function bytesAt(source: Source, position: number, size: number): Promise<Buffer> {
+  const { bytesRead, buffer } = await source.file.read(Buffer.alloc(size), 0, size, source.startsAt + position);
   if (bytesRead < size && position > 0) throw new RangeError('cut short');
   return buffer;
 }

@@ -37,11 +37,21 @@ export class ApiClient {
   delete = (path: string, body?: unknown) => this.ask('DELETE', path, body);
 
   /** Sends a file as one multipart field `file`, with further text fields. */
-  async sendFile(path: string, file: { name: string; bytes: Uint8Array }, fields: Record<string, string> = {}) {
+  async sendFile(
+    path: string,
+    file: { name: string; bytes: Uint8Array },
+    fields: Record<string, string> = {},
+    actId: string = randomUUID(),
+  ) {
     const form = new FormData();
     for (const [name, value] of Object.entries(fields)) form.set(name, value);
     form.set('file', new Blob([new Uint8Array(file.bytes)]), file.name);
-    return this.#fetch('POST', path, form, { 'x-act-id': randomUUID() });
+    return this.#fetch('POST', path, form, { 'x-act-id': actId });
+  }
+
+  /** What a browser signed in like this sends along, for requests made by hand. */
+  headers(): Record<string, string> {
+    return { cookie: this.#cookie, 'x-request-token': this.#token };
   }
 
   ask(method: string, path: string, body?: unknown, actId: string = randomUUID()): Promise<Answered> {

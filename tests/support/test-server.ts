@@ -33,6 +33,7 @@ export async function startTestServer(options: StartOptions & { environment?: Re
   return {
     ...server,
     databaseUrl: fresh.url,
+    uploadsFolder: uploads,
     visitor: () => new ApiClient(server.address),
     stop: async () => {
       await server.stop();

@@ -12,15 +12,7 @@ const ready: ReadinessFacts = {
     { number: 1, line: 'load', isSetAside: false, isStale: false },
     { number: 2, line: 'mirror', isSetAside: false, isStale: false },
   ],
-  findings: {
-    outline: [
-      { title: 'What was asked', isEmpty: false },
-      { title: 'What came in', isEmpty: false },
-    ],
-    staleValues: 0,
-    staleFigures: 0,
-    unresolved: 0,
-  },
+  findings: { wordCount: 120, staleBoundValues: [], unresolved: 0, emptyParts: [] },
 };
 
 const codesOf = (change: Partial<ReadinessFacts>) => readinessOf({ ...ready, ...change }).map((point) => point.code);
@@ -51,14 +43,13 @@ describe('a case on its way to review', () => {
       { estimates: [{ ...ready.estimates[0], isStale: true }, ready.estimates[1]] },
       'estimate-stale',
     ],
-    ['with a stale value in the findings', findings({ staleValues: 1 }), 'findings-stale'],
-    ['with a stale figure in the findings', findings({ staleFigures: 2 }), 'findings-stale'],
-    ['with a value that points at nothing', findings({ unresolved: 1 }), 'unresolved'],
     [
-      'whose findings are empty',
-      findings({ outline: ready.findings.outline.map((part) => ({ ...part, isEmpty: true })) }),
-      'findings-empty',
+      'with a stale value or figure in the findings',
+      findings({ staleBoundValues: [{ words: 'Stress, flaw line', part: 'Stress at the origin' }] }),
+      'findings-stale',
     ],
+    ['with a value that points at nothing', findings({ unresolved: 1 }), 'unresolved'],
+    ['whose findings are empty', findings({ wordCount: 0, emptyParts: ['What was asked'] }), 'findings-empty'],
   ])('is blocked when it is one %s', (_words, change, code) => {
     const points = readinessOf({ ...ready, ...change });
     expect(points.map(({ code: found, kind }) => ({ found, kind }))).toEqual([{ found: code, kind: 'blocker' }]);
@@ -83,11 +74,7 @@ describe('a case on its way to review', () => {
       { missingPieces: [{ code: 'M1', originLies: 'not known', isNamedInFindings: false }] },
       'limit-unsaid',
     ],
-    [
-      'one part of the outline is empty',
-      findings({ outline: [ready.findings.outline[0], { title: 'What came in', isEmpty: true }] }),
-      'part-empty',
-    ],
+    ['one part of the outline is empty', findings({ emptyParts: ['What came in'] }), 'part-empty'],
   ])('has a note when %s', (_words, change, code) => {
     const points = readinessOf({ ...ready, ...change });
     expect(points.map(({ code: found, kind }) => ({ found, kind }))).toEqual([{ found: code, kind: 'note' }]);

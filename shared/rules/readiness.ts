@@ -1,3 +1,4 @@
+import type { FindingsFacts } from '../contracts/findings.ts';
 import type { OriginLies } from '../vocabulary/pieces.ts';
 import type { EstimateLine } from '../vocabulary/estimate-lines.ts';
 import type { FractographState } from '../vocabulary/fractographs.ts';
@@ -24,13 +25,8 @@ export type ReadinessFacts = {
     readonly isSetAside: boolean;
     readonly isStale: boolean;
   }[];
-  readonly findings: {
-    /** The parts of the outline in order, and whether anything stands in them. */
-    readonly outline: readonly { readonly title: string; readonly isEmpty: boolean }[];
-    readonly staleValues: number;
-    readonly staleFigures: number;
-    /** Values and figures in the text whose record is not there. */
-    readonly unresolved: number;
+  readonly findings: Pick<FindingsFacts, 'wordCount' | 'unresolved' | 'emptyParts'> & {
+    readonly staleBoundValues: readonly Pick<FindingsFacts['staleBoundValues'][number], 'words' | 'part'>[];
   };
 };
 
@@ -123,33 +119,22 @@ const estimateRule: Rule = ({ estimates }) => {
   ];
 };
 
-const findingsRule: Rule = ({ findings: { outline, staleValues, staleFigures, unresolved } }) => {
-  const empty = outline.filter((part) => part.isEmpty);
-  const stale = [counted(staleValues, 'value'), counted(staleFigures, 'figure')]
-    .filter((words) => words !== '')
-    .join(' and ');
-  return [
-    ...ifSo(
-      empty.length === outline.length,
-      blocker('findings-empty', 'findings', 'Nothing is written in the findings.'),
+const findingsRule: Rule = ({ findings: { wordCount, staleBoundValues, unresolved, emptyParts } }) => [
+  ...ifSo(wordCount === 0, blocker('findings-empty', 'findings', 'Nothing is written in the findings.')),
+  ...staleBoundValues.map(({ words, part }) =>
+    blocker('findings-stale', 'findings', `${words}, in “${part}”, rests on something that has changed.`),
+  ),
+  ...ifSo(
+    unresolved > 0,
+    blocker(
+      'unresolved',
+      'findings',
+      unresolved === 1
+        ? 'One value in the findings has no source.'
+        : `${unresolved} values in the findings have no source.`,
     ),
-    ...ifSo(
-      stale !== '',
-      blocker('findings-stale', 'findings', `${stale} in the findings rest on something that has changed.`),
-    ),
-    ...ifSo(
-      unresolved > 0,
-      blocker('unresolved', 'findings', `${counted(unresolved, 'bound place')} in the findings point at no record.`),
-    ),
-    ...(empty.length === outline.length
-      ? []
-      : empty.map(({ title }) => note('part-empty', 'findings', `“${title}” is empty.`))),
-  ];
-};
+  ),
+  ...(wordCount === 0 ? [] : emptyParts.map((part) => note('part-empty', 'findings', `“${part}” is empty.`))),
+];
 
 const rules: readonly Rule[] = [intakeRule, evidenceRule, fractographRule, estimateRule, findingsRule];
-
-function counted(count: number, noun: string): string {
-  if (count === 0) return '';
-  return count === 1 ? `1 ${noun}` : `${count} ${noun}s`;
-}

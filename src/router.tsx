@@ -13,6 +13,9 @@ export const router = createBrowserRouter([
     errorElement: <PageFailed />,
     children: [
       { path: '/sign-in', lazy: () => import('./pages/sign-in.tsx') },
+      { path: '/invitation/:token', lazy: () => import('./pages/invitation.tsx') },
+      { path: '/password', lazy: () => import('./pages/ask-password.tsx') },
+      { path: '/password/:token', lazy: () => import('./pages/new-password.tsx') },
       {
         element: <SignedIn />,
         children: [
@@ -25,6 +28,17 @@ export const router = createBrowserRouter([
                 path: '/cases/:number',
                 lazy: () => import('./pages/case/case-leaf.tsx'),
                 children: [{ index: true, element: <Navigate to="intake" replace /> }],
+              },
+              { path: '/me', lazy: () => import('./pages/me.tsx') },
+              {
+                path: '/laboratory',
+                lazy: () => import('./pages/laboratory/laboratory-leaf.tsx'),
+                children: [
+                  { index: true, element: <Navigate to="people" replace /> },
+                  { path: 'people', lazy: () => import('./pages/laboratory/people.tsx') },
+                  { path: 'mail', lazy: () => import('./pages/laboratory/mail.tsx') },
+                  { path: 'trail', lazy: () => import('./pages/laboratory/trail.tsx') },
+                ],
               },
               { path: '*', element: <NothingHere /> },
             ],

@@ -1,5 +1,7 @@
 import type { z } from 'zod';
+import { SessionView } from '#shared/contracts/people.ts';
 import { ProblemBody } from '#shared/contracts/problem.ts';
+import { waitForSignIn } from './session-ended.ts';
 
 /** A refusal of the server, or of the way to it, as the page shows it. */
 export class Refusal extends Error {
@@ -12,10 +14,18 @@ export class Refusal extends Error {
 }
 
 let requestToken = '';
+let personId: string | null = null;
 
-/** The token of this session, taken from whoever asked for the session last. */
-export function keepRequestToken(token: string): void {
-  requestToken = token;
+/** Keeps the token of this session for the acts that follow, and whose session it is. */
+export function keepSession(session: SessionView): SessionView {
+  requestToken = session.requestToken;
+  personId = session.person?.id ?? null;
+  return session;
+}
+
+/** What an act sent by other means than `send` carries: a file on its way in tells how much of it is there. */
+export function actHeaders(actId: string): Record<string, string> {
+  return { 'x-request-token': requestToken, 'x-act-id': actId };
 }
 
 /** Reads from the server and checks the answer against its contract. @throws Refusal */
@@ -52,12 +62,46 @@ export async function send<Schema extends z.ZodType>(
   }
 }
 
+type AskOptions = { signal?: AbortSignal; actId?: string };
+
+/** Asks, and where the session has ended asks once more after the same person has signed in again. */
 async function ask<Schema extends z.ZodType>(
   method: 'GET' | Method,
   path: string,
   body: unknown,
   schema: Schema,
-  options: { signal?: AbortSignal; actId?: string },
+  options: AskOptions,
+): Promise<z.output<Schema>> {
+  try {
+    return await askOnce(method, path, body, schema, options);
+  } catch (error) {
+    if (!(error instanceof Refusal) || !(await isSignedInAgain(error))) throw error;
+    return askOnce(method, path, body, schema, options);
+  }
+}
+
+/** After a refusal for want of a session or of its token: whether the same person is here, with a new token. */
+async function isSignedInAgain({ body }: Refusal): Promise<boolean> {
+  if (body.code === 'not-signed-in') return waitForSignIn();
+  if (body.code !== 'forged-request') return false;
+  const before = personId;
+  const session = await askOnce('GET', '/session', undefined, SessionView, {});
+  if (before !== null && session.person === null) return waitForSignIn();
+  if (before !== null && session.person?.id !== before) {
+    // Someone else has signed in in this browser; what is on this page must not be done in their name.
+    window.location.assign('/');
+    return false;
+  }
+  keepSession(session);
+  return true;
+}
+
+async function askOnce<Schema extends z.ZodType>(
+  method: 'GET' | Method,
+  path: string,
+  body: unknown,
+  schema: Schema,
+  options: AskOptions,
 ): Promise<z.output<Schema>> {
   const response = await fetch(`/api${path}`, {
     method,

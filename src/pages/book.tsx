@@ -6,7 +6,7 @@ import { mayInLaboratory } from '#shared/rules/may.ts';
 import type { Person } from '#shared/contracts/people.ts';
 import { send } from '../http/api.ts';
 import { queryClient } from '../http/query-client.ts';
-import { usePerson } from '../http/session.ts';
+import { usePerson, useSettings } from '../http/session.ts';
 import { KeyListDialog } from '../shell/key-list-dialog.tsx';
 import { useGlobalKeys } from '../shell/keys.ts';
 import type { Place } from '../shell/place.ts';
@@ -40,6 +40,7 @@ const placeOfLetter: Readonly<Record<string, string>> = { c: '/', m: '/materials
 /** Every place under the running head. */
 export function Book() {
   const person = usePerson();
+  const { letterKeys } = useSettings();
   const signOut = useSignOut();
   const navigate = useNavigate();
   const { pathname } = useLocation();
@@ -53,7 +54,7 @@ export function Book() {
     },
     [navigate],
   );
-  useGlobalKeys({ onFind: find, onListKeys: list, onGo: go });
+  useGlobalKeys({ onFind: find, onListKeys: list, onGo: go, off: !letterKeys });
   const isCurrent = (place: Place) =>
     place.to === '/' ? pathname === '/' || pathname.startsWith('/cases') : pathname.startsWith(place.to);
   return (

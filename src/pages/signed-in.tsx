@@ -1,5 +1,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { Navigate, Outlet, useLocation } from 'react-router-dom';
+import { KeptSettings } from '../features/people/components/kept-settings.tsx';
+import { SessionEndedDialog } from '../features/people/components/session-ended-dialog.tsx';
 import { sessionQuery } from '../http/session.ts';
 import { LoadingState } from '../ui/loading-state.tsx';
 import { ErrorState } from '../ui/error-state.tsx';
@@ -11,5 +13,11 @@ export function SignedIn() {
   if (session.isPending) return <LoadingState words="Opening the book…" />;
   if (session.isError) return <ErrorState what="The book could not be opened." why={session.error.message} />;
   if (!session.data.person) return <Navigate to={`/sign-in?to=${encodeURIComponent(pathname + search)}`} replace />;
-  return <Outlet />;
+  return (
+    <>
+      <Outlet />
+      <KeptSettings settings={session.data.settings} />
+      <SessionEndedDialog person={session.data.person} />
+    </>
+  );
 }

@@ -9,6 +9,7 @@ export type ThemePlace = 'book' | 'bench';
 const keys: Record<ThemePlace, string> = { book: 'hb-theme', bench: 'hb-theme-bench' };
 const firstChoice: Record<ThemePlace, Theme> = { book: 'paper', bench: 'bench light' };
 const listeners = new Set<() => void>();
+const hearsBook = new Set<(theme: Theme) => void>();
 let place: ThemePlace = 'book';
 
 /** The theme kept for a place on this machine; the place's first choice where none is kept or storage is closed. */
@@ -36,6 +37,23 @@ function keepTheme(theme: Theme): void {
   listeners.forEach((tell) => tell());
 }
 
+/** Takes the theme that the person keeps for the book, at the sign-in on whatever machine. */
+export function takeBookTheme(theme: Theme): void {
+  try {
+    localStorage.setItem(keys.book, theme);
+  } catch {
+    // A closed storage only means that the choice lasts as long as the page.
+  }
+  if (place === 'book') document.documentElement.classList.toggle('bench-light', theme === 'bench light');
+  listeners.forEach((tell) => tell());
+}
+
+/** Hears what the person chooses for the book, to keep it with their settings. @returns how to stop hearing */
+export function onBookThemeChosen(hear: (theme: Theme) => void): () => void {
+  hearsBook.add(hear);
+  return () => hearsBook.delete(hear);
+}
+
 function enter(next: ThemePlace): void {
   place = next;
   applyTheme();
@@ -56,6 +74,7 @@ export function useTheme(onChosen?: (theme: Theme) => void): { theme: Theme; set
     (next: Theme) => {
       keepTheme(next);
       onChosen?.(next);
+      if (place === 'book') hearsBook.forEach((hear) => hear(next));
     },
     [onChosen],
   );

@@ -274,6 +274,13 @@ describe('an organisation', () => {
   });
 });
 
+describe('the laboratory itself', () => {
+  it('stands once in a book', async () => {
+    const second = await people.administrator.client.post('/organisations', { name: 'Another', kind: 'laboratory' });
+    expect(second.body).toMatchObject({ code: 'already-there', field: 'kind' });
+  });
+});
+
 describe('own settings', () => {
   it('follow the person to the next sign-in', async () => {
     const { client, mail } = people.requester;

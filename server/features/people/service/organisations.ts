@@ -15,6 +15,7 @@ export function enterOrganisation(context: VisitorContext, entry: OrganisationEn
 /** The same within a transaction under way. */
 export async function writeOrganisation(tx: Transaction, doer: VisitorContext['person'], entry: OrganisationEntry) {
   await checkNameFree(tx, entry.name);
+  if (entry.kind === 'laboratory') await checkFirstLaboratory(tx);
   const organisation = await insertOrganisation(tx, entry);
   await recordAct(tx, doer, { act: 'organisation.entered', objectId: organisation.id, after: entry });
   return organisation;
@@ -39,6 +40,13 @@ export function changeOrganisation(context: VisitorContext, id: string, change: 
     });
     return after;
   });
+}
+
+// Its people see every case, so a second one would be a way round the walls.
+async function checkFirstLaboratory(tx: Transaction): Promise<void> {
+  const laboratory = (await listOrganisations(tx)).find(({ kind }) => kind === 'laboratory');
+  if (laboratory)
+    throw new Problem('already-there', `This book has its laboratory already: ${laboratory.name}.`, { field: 'kind' });
 }
 
 async function checkNameFree(tx: Transaction, name: string): Promise<void> {

@@ -118,9 +118,9 @@ describe('drawing on the bench', () => {
     expect(geometry.halfAxisDepthPx).toBeGreaterThan(34);
   });
 
-  it('reads a scale bar as a length in px and keeps no mark', () => {
+  it('reads a scale bar by its two ends and keeps no mark', () => {
     const { asks } = doing([{ kind: 'tool picked', tool: 'scale bar' }, ...setAt(100, 700), ...setAt(400, 700)]);
-    expect(asks).toEqual([{ kind: 'bar read', lengthPx: 300 }]);
+    expect(asks).toEqual([{ kind: 'bar read', from: { x: 100, y: 700 }, to: { x: 400, y: 700 } }]);
   });
 });
 

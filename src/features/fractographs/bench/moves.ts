@@ -41,7 +41,7 @@ export type Move =
 export type Ask =
   | { readonly kind: 'draw'; readonly mark: MarkDrawn }
   | { readonly kind: 'move'; readonly markId: string; readonly geometry: MarkGeometry }
-  | { readonly kind: 'bar read'; readonly lengthPx: number };
+  | { readonly kind: 'bar read'; readonly from: PointPx; readonly to: PointPx };
 
 export type Step = { readonly state: BenchState; readonly ask: Ask | null };
 
@@ -200,11 +200,9 @@ function setPoint(state: BenchState, marks: readonly ShownMark[]): Step {
 }
 
 function barPoint(state: BenchState, points: readonly PointPx[]): Step {
-  if (points.length < 2) return only({ ...state, points });
-  return {
-    state: { ...state, points: [] },
-    ask: { kind: 'bar read', lengthPx: lengthOf(minus(points[1], points[0])) },
-  };
+  const [from, to] = points;
+  if (!from || !to) return only({ ...state, points });
+  return { state: { ...state, points: [] }, ask: { kind: 'bar read', from, to } };
 }
 
 function drawnFrom(

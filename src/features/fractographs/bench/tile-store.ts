@@ -63,6 +63,12 @@ export class TileStore<Picture> {
     return this.#wanted.every((tile) => this.#held.has(keyOf(tile)));
   }
 
+  /** Takes up work again, after a close too. */
+  open(): void {
+    this.#closed = false;
+    this.#loadMore();
+  }
+
   close(): void {
     this.#closed = true;
     for (const loading of this.#underWay.values()) loading.abort();

@@ -46,8 +46,10 @@ const StaffRow = z.object({
   assignedTo: Named.nullable(),
   hasFractographs: z.boolean(),
   originCode: z.enum(originCodes).nullable(),
-  /** The newest origin mark on a figure that is ready, image px; absent where there is none. */
-  picture: z.object({ fractographId: z.uuid(), x: z.number(), y: z.number() }).nullable(),
+  /** The newest origin mark on a figure that is ready, and how much to show about it, image px; absent without one. */
+  picture: z
+    .object({ fractographId: z.uuid(), x: z.number(), y: z.number(), acrossPx: z.number().int() })
+    .nullable(),
   stale: z.object({ why: z.string(), since: z.iso.datetime() }).nullable(),
 });
 const FollowedRow = z.object({

@@ -71,7 +71,7 @@ export function presentCasebookRow(row: CasebookRowRead, seenAs: CasebookRow['se
   const [receivedAt, stateSince] = [iso(row.received_at), iso(row.state_since)];
   if (seenAs === 'administrator') return { seenAs, number, state, holdUntil: row.hold_until };
   if (seenAs === 'requester') return { seenAs, number, title, plainState: plainStateOf[state], receivedAt, stateSince };
-  const { picture_fractograph_id: fractographId, picture_x: x, picture_y: y } = row;
+  const { picture_fractograph_id: fractographId, picture_x: x, picture_y: y, picture_across: acrossPx } = row;
   return {
     ...{ seenAs, number, title, state, urgency, receivedAt },
     material: row.material,
@@ -80,7 +80,10 @@ export function presentCasebookRow(row: CasebookRowRead, seenAs: CasebookRow['se
     assignedTo: named(row.assigned_to, row.assigned_name),
     hasFractographs: row.has_fractographs,
     originCode: row.origin_code,
-    picture: fractographId !== null && x !== null && y !== null ? { fractographId, x, y } : null,
+    picture:
+      fractographId !== null && x !== null && y !== null && acrossPx !== null
+        ? { fractographId, x, y, acrossPx }
+        : null,
     stale:
       row.stale_why !== null && row.stale_since !== null ? { why: row.stale_why, since: iso(row.stale_since) } : null,
   };

@@ -22,6 +22,7 @@ export type CasebookRowRead = {
   picture_fractograph_id: string | null;
   picture_x: number | null;
   picture_y: number | null;
+  picture_across: number | null;
   stale_why: string | null;
   stale_since: string | null;
 };
@@ -30,6 +31,8 @@ type Asked = { person: Person; query: CasebookQuery; thisYear: number };
 
 // Years have four digits and are followed by the place in the year, which may outgrow four.
 const numberOrder = sql`(substr(c.number, 4, 4) || lpad(substr(c.number, 9), 8, '0'))`;
+// Of the image's width, so that the mirror about the origin is seen with it.
+const shareShown = sql`0.35`;
 const stateOrder = sql`array_position(
   array['received', 'examining', 'drafting', 'in review', 'closed', 'withdrawn'], c.state)`;
 
@@ -46,14 +49,16 @@ export function casebookPage({ person, query, thisYear }: Asked): SQL {
     select c.number, c.title, c.state, c.urgency, c.hold_until::text, c.received_at, c.state_since, c.closed_at,
       m.name as material, c.assigned_to, h.name as assigned_name,
       exists (select 1 from fractographs f where f.case_id = c.id) as has_fractographs,
-      o.origin_code, o.picture_fractograph_id, o.picture_x, o.picture_y, s.why as stale_why, s.since as stale_since
+      o.origin_code, o.picture_fractograph_id, o.picture_x, o.picture_y, o.picture_across,
+      s.why as stale_why, s.since as stale_since
     from page join cases c on c.id = page.id
     left join materials m on m.id = c.material_id
     left join people h on h.id = c.assigned_to
     left join lateral (
       select v.origin_code,
         case when f.state = 'ready' then f.id end as picture_fractograph_id,
-        (v.geometry -> 'at' ->> 'x')::float8 as picture_x, (v.geometry -> 'at' ->> 'y')::float8 as picture_y
+        (v.geometry -> 'at' ->> 'x')::float8 as picture_x, (v.geometry -> 'at' ->> 'y')::float8 as picture_y,
+        round(f.width_px * ${shareShown})::int as picture_across
       from marks k join fractographs f on f.id = k.fractograph_id
       join lateral (
         select w.origin_code, w.geometry, w.removed, w.made_at, w.id from mark_versions w

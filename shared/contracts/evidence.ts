@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { parseMeasured } from '../numeric/units/parse-measured.ts';
 import { materialFamilies } from '../vocabulary/constant-kinds.ts';
 import { faces, fragmentStatuses, fragmentWays, originLies } from '../vocabulary/pieces.ts';
 import { Named } from './fractographs.ts';
@@ -40,10 +41,15 @@ export type PartDetails = z.infer<typeof PartDetails>;
 export const PartChange = PartDetails.extend({ version });
 export type PartChange = z.infer<typeof PartChange>;
 
+const typedMass = optionalLine.superRefine((typed, context) => {
+  const read = typed === null ? null : parseMeasured(typed, { kind: 'mass', openUnit: true });
+  if (read?.kind === 'refused') context.addIssue({ code: 'custom', message: read.reason });
+});
+
 const pieceLines = {
   description: line('Say what the piece is.'),
   /** As typed, value ± U (k = 2) with its unit; null while not weighed. */
-  mass: optionalLine,
+  mass: typedMass,
   condition: optionalLine,
   receivedOn: optionalDay,
 };

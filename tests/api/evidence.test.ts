@@ -1,10 +1,10 @@
 import { randomUUID } from 'node:crypto';
-import pg from 'pg';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { openNewCase } from '#server/features/cases/service/open-a-case.ts';
 import { limitSentences, mateOf } from '#server/features/evidence/service/read-evidence.ts';
 import { openCase } from '#server/rights/open-case.ts';
-import { CaseNumber } from '#shared/contracts/ids.ts';
+import { aCase } from '../support/a-bar-case.ts';
+import { anImage, bringIn, settled } from '../support/an-image.ts';
+import { closeByHand } from '../support/close-by-hand.ts';
 import { aLaboratory, startTestServer, type TestServer } from '../support/test-server.ts';
 
 let server: TestServer;
@@ -15,19 +15,6 @@ beforeAll(async () => {
   people = await aLaboratory(server);
 });
 afterAll(() => server.stop());
-
-async function aCase(): Promise<CaseNumber> {
-  const { number } = await openNewCase(people.analyst.context, {
-    title: 'Post, porcelain: broke at the foot',
-    summary: '',
-    kind: 'service part',
-    urgency: 'routine',
-    organisationId: people.maker.id,
-    materialId: null,
-    questions: [],
-  });
-  return CaseNumber.parse(number);
-}
 
 const aPart = {
   description: 'Post insulator',
@@ -41,9 +28,9 @@ const aPart = {
 };
 
 async function aCaseWithPart() {
-  const number = await aCase();
+  const { id, number } = await aCase(people);
   const { body } = await people.analyst.client.post(`/cases/${number}/evidence/parts`, aPart);
-  return { number, at: `/cases/${number}/evidence`, partId: String(body.id) };
+  return { caseId: id, number, at: `/cases/${number}/evidence`, partId: String(body.id) };
 }
 
 const aPiece = (partId: string) => ({
@@ -61,13 +48,6 @@ const aPiece = (partId: string) => ({
 async function receive(at: string, partId: string, more: object = {}) {
   const { body } = await people.analyst.client.post(`${at}/pieces`, { ...aPiece(partId), ...more });
   return body;
-}
-
-async function closeBeneath(number: string): Promise<void> {
-  const client = new pg.Client({ connectionString: server.databaseUrl });
-  await client.connect();
-  await client.query(`update cases set state = 'closed', closed_at = now() where number = $1`, [number]);
-  await client.end();
 }
 
 describe('receiving pieces', () => {
@@ -229,6 +209,28 @@ describe('mating faces', () => {
     expect((await people.analyst.client.post(`${at}/mates`, pairing)).status).toBe(201);
   });
 
+  it('lead from a fractograph of the one to one of the other, of the same view where there is one', async () => {
+    const { number, at, partId } = await aCaseWithPart();
+    const [f1, f2] = [await receive(at, partId), await receive(at, partId)];
+    const bytes = await anImage('png', { widthPx: 60, heightPx: 40 });
+    const taken = async (fragmentId: string, face: 'A' | 'B', view: string) => {
+      const { body } = await bringIn(people.analyst, number, { name: 'face.png', bytes }, { fragmentId, face, view });
+      return settled(people.analyst, number, String(body.id));
+    };
+    const one = await taken(f1.id, 'A', 'origin');
+    await taken(f2.id, 'B', 'face');
+    const mate = await taken(f2.id, 'B', 'origin');
+    const mateIdOf = async (id: string) =>
+      (await people.analyst.client.get(`/cases/${number}/fractographs/${id}`)).body.mateId;
+    expect(await mateIdOf(one.id)).toBeNull();
+    await people.analyst.client.post(`${at}/mates`, {
+      one: { fragmentId: f2.id, face: 'B' },
+      other: { fragmentId: f1.id, face: 'A' },
+      crack: null,
+    });
+    expect([await mateIdOf(one.id), await mateIdOf(mate.id)]).toEqual([mate.id, one.id]);
+  });
+
   it('are two: no face is its own mate', async () => {
     const { at, partId } = await aCaseWithPart();
     const f1 = await receive(at, partId);
@@ -261,8 +263,8 @@ describe('who may change the pieces of a case', () => {
   });
 
   it('is no one once the case is sealed', async () => {
-    const { number, at, partId } = await aCaseWithPart();
-    await closeBeneath(number);
+    const { caseId, at, partId } = await aCaseWithPart();
+    await closeByHand(server, caseId);
     const answered = await people.analyst.client.post(`${at}/pieces`, aPiece(partId));
     expect(answered).toMatchObject({ status: 409, body: { code: 'closed-case' } });
     const { body } = await people.analyst.client.get(at);

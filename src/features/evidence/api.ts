@@ -1,5 +1,5 @@
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
-import type { z } from 'zod';
+import { z } from 'zod';
 import { EvidenceView } from '#shared/contracts/evidence.ts';
 import { FractographList } from '#shared/contracts/fractographs.ts';
 import { MaterialList } from '#shared/contracts/materials.ts';
@@ -41,5 +41,15 @@ export function useEvidenceAct(number: string) {
     mutationFn: ({ method, path, body, schema }: EvidenceAct) =>
       send(method, `/cases/${number}/evidence${path}`, body, schema),
     onSettled: () => client.invalidateQueries({ queryKey: evidenceOf(number).queryKey }),
+  });
+}
+
+/** Names the material of the case. */
+export function useCaseMaterial(number: string) {
+  const client = useQueryClient();
+  return useMutation({
+    mutationFn: (named: { materialId: string; versionSeen: number }) =>
+      send('PATCH', `/cases/${number}`, named, z.unknown()),
+    onSettled: () => client.invalidateQueries({ queryKey: ['case', number] }),
   });
 }

@@ -3,6 +3,7 @@ import { useParams } from 'react-router-dom';
 import type { FractographView } from '#shared/contracts/fractographs.ts';
 import { mayInLaboratory } from '#shared/rules/may.ts';
 import { dayOf } from '#shared/wording/dates.ts';
+import { caseOf } from '#src/features/cases/api.ts';
 import { evidenceOf, facesTakenOf, materialsOffered } from '#src/features/evidence/api.ts';
 import type { FacePicture } from '#src/features/evidence/components/face-pictures.ts';
 import { PiecesPage } from '#src/features/evidence/components/pieces-page.tsx';
@@ -21,6 +22,7 @@ export function Component() {
   const { number = '' } = useParams();
   const person = usePerson();
   const evidence = useQuery(evidenceOf(number));
+  const { data: caseSeen } = useQuery(caseOf(number));
   const fractographs = useQuery(facesTakenOf(number));
   const materials = useQuery({ ...materialsOffered, enabled: mayInLaboratory(person, 'read materials').allowed });
   if (evidence.isPending) return <Reading />;
@@ -30,7 +32,13 @@ export function Component() {
   return (
     <Spread>
       <Page label="What broke" folio={{ chapter: 'ii', words: 'The pieces, seen', side: 'left' }}>
-        <SeenPage number={number} evidence={evidence.data} materials={offered} pictures={pictures} />
+        <SeenPage
+          number={number}
+          evidence={evidence.data}
+          materials={offered}
+          pictures={pictures}
+          caseSeen={caseSeen}
+        />
       </Page>
       <Page label="Pieces" folio={{ chapter: 'ii', words: 'The pieces, held', side: 'right' }}>
         <PiecesPage

@@ -20,7 +20,7 @@ type ActFormProps = {
 /** A form in the page for one act; what was typed stays on every refusal. */
 export function ActForm({ title, aside, act, error, isSending, onSubmit, onLeave, children }: ActFormProps) {
   return (
-    <form noValidate onSubmit={onSubmit} className="mt-5">
+    <form noValidate onSubmit={onSubmit} className="mt-5 first:mt-0">
       <RuleHead small level={4} aside={aside}>
         {title}
       </RuleHead>

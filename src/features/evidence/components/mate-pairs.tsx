@@ -38,13 +38,13 @@ function MatePair({ number, pair, pictures, mayChange }: MatePairProps) {
   const bothShown = one !== null && other !== null;
   return (
     <div className="mt-3">
-      <div className="grid grid-cols-2 gap-[2px]">
+      <div className="grid grid-cols-2 gap-1">
         <FacePlate face={pair.one} picture={one} mirrored={false} />
         <FacePlate face={pair.other} picture={other} mirrored={mirrored && bothShown} />
       </div>
       <div className="mt-2 flex flex-wrap items-baseline justify-between gap-x-4">
         <span className="text-s text-ink-2">
-          {pair.crack ? `Parted by crack ${pair.crack}; ` : ''}paired by {pair.pairedBy.name}.
+          {pair.crack ? `Crack ${pair.crack}; paired by ` : 'Paired by '} {pair.pairedBy.name}.
         </span>
         <span className="acts">
           {bothShown ? (
@@ -69,7 +69,7 @@ type FacePlateProps = { face: MatePairView['one']; picture: FacePicture | null; 
 function FacePlate({ face, picture, mirrored }: FacePlateProps) {
   const name = `${face.code}, face ${face.face}`;
   return (
-    <figure className="min-w-0">
+    <figure className="flex min-w-0 flex-col">
       {picture ? (
         <img
           src={picture.src}
@@ -77,7 +77,7 @@ function FacePlate({ face, picture, mirrored }: FacePlateProps) {
           className={`aspect-[3/2] w-full bg-plate object-cover ${mirrored ? '-scale-x-100' : ''}`}
         />
       ) : (
-        <div className="flex aspect-[3/2] items-center justify-center border border-dashed border-control px-3 text-center text-s text-ink-2">
+        <div className="flex h-full min-h-[74px] items-center justify-center border border-dashed border-control px-3 text-center text-s text-ink-2">
           No fractograph of this face yet
         </div>
       )}

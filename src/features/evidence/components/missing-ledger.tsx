@@ -44,10 +44,10 @@ function MissingRow({ piece }: { piece: PieceView }) {
           <b>{code}</b>
         </GlyphWord>
       </td>
-      <td className="is-wide py-2">
+      <td className="is-wide py-2 narrow:!py-0">
         {description}; {missingReason}
       </td>
-      <td className="is-wide py-2" data-word="Origin on it:">
+      <td className="is-wide py-2 narrow:!py-0" data-word="Origin on it:">
         <b className={limit ? 'text-iron' : 'font-normal'}>{originLies}</b>
         {limit ? <span className="text-ink-2">, a limit stands in the findings</span> : null}
       </td>

@@ -10,7 +10,12 @@ type PartFactsProps = { number: string; part: PartView; mayChange: boolean; mate
 /** What broke: one part and what is known of it. */
 export function PartFacts({ number, part, mayChange, materials }: PartFactsProps) {
   const [changing, setChanging] = useState(false);
-  if (changing) return <PartForm number={number} part={part} materials={materials} onDone={() => setChanging(false)} />;
+  if (changing)
+    return (
+      <div className="mb-6">
+        <PartForm number={number} part={part} materials={materials} onDone={() => setChanging(false)} />
+      </div>
+    );
   const facts = factsOfPart(part);
   return (
     <div className="mb-5">

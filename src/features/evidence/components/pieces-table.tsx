@@ -60,7 +60,7 @@ function PartRow({ part, pieces }: { part: PartView; pieces: readonly PieceView[
   return (
     <tr className="font-semibold">
       <td className="whitespace-nowrap">
-        <span className="inline-flex items-center gap-2">
+        <span className="inline-flex items-center gap-2 align-middle">
           <PieceGlyph piece="part" />
           part
         </span>
@@ -82,7 +82,7 @@ function PieceRow({ piece, depth, isOpen, onOpen }: PieceRowProps) {
   return (
     <tr aria-selected={isOpen || undefined}>
       <td className="whitespace-nowrap">
-        <span className="inline-flex items-center gap-2">
+        <span className={`inline-flex items-center gap-2 align-middle ${isOpen ? '-ml-[9px] narrow:ml-0' : ''}`}>
           <Branch depth={depth} />
           <PieceGlyph piece={shapeOf(piece)} />
           <span className="mono">{onOpen ? <OpenCode piece={piece} onOpen={onOpen} /> : piece.code}</span>
@@ -92,10 +92,10 @@ function PieceRow({ piece, depth, isOpen, onOpen }: PieceRowProps) {
       <td className="num is-corner">
         {mass ? <Quantity {...mass} /> : <span className="whitespace-nowrap text-ink-3">not weighed</span>}
       </td>
-      <td className={isMissing ? 'text-ink-3' : undefined} data-word="in">
+      <td className={isMissing ? 'text-ink-3' : undefined} data-word={isMissing ? undefined : 'at'}>
         {piece.place}
       </td>
-      <td className={isMissing ? 'text-ink-3' : 'is-end'} data-word="with">
+      <td className={isMissing ? 'is-end text-ink-3' : 'is-end'} data-word={isMissing ? undefined : 'with'}>
         {piece.holder}
       </td>
       <td className={`is-wide text-s ${remark ? toneClass[remark.tone] : ''}`}>{remark?.words}</td>

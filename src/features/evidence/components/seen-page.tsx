@@ -1,3 +1,4 @@
+import type { CaseAnswer } from '#shared/contracts/cases.ts';
 import type { EvidenceView } from '#shared/contracts/evidence.ts';
 import { Caution } from '#src/ui/caution.tsx';
 import { RuleHead } from '#src/ui/rule-head.tsx';
@@ -6,6 +7,7 @@ import type { FacePicture } from './face-pictures.ts';
 import { MatePairs } from './mate-pairs.tsx';
 import { MissingLedger } from './missing-ledger.tsx';
 import { PartFacts } from './part-facts.tsx';
+import { OfferMaterial } from './offer-material.tsx';
 import type { MaterialOffered } from './part-form.tsx';
 
 type SeenPageProps = {
@@ -13,10 +15,12 @@ type SeenPageProps = {
   evidence: EvidenceView;
   materials: readonly MaterialOffered[];
   pictures: readonly FacePicture[];
+  /** The case, once it is read, for the material it names. */
+  caseSeen: CaseAnswer | undefined;
 };
 
 /** The left page of the chapter: what broke, what is not there, which faces belong together, and what to mind. */
-export function SeenPage({ number, evidence, materials, pictures }: SeenPageProps) {
+export function SeenPage({ number, evidence, materials, pictures, caseSeen }: SeenPageProps) {
   const { parts, pieces, mates, change } = evidence;
   return (
     <>
@@ -29,6 +33,7 @@ export function SeenPage({ number, evidence, materials, pictures }: SeenPageProp
       {parts.map((part) => (
         <PartFacts key={part.id} number={number} part={part} mayChange={change.allowed} materials={materials} />
       ))}
+      {change.allowed ? <OfferMaterial number={number} parts={parts} caseSeen={caseSeen} /> : null}
       {parts.length > 0 ? <MissingLedger pieces={pieces} /> : null}
       {pieces.length > 1 ? (
         <MatePairs number={number} mates={mates} pictures={pictures} mayChange={change.allowed} />

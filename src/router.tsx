@@ -27,7 +27,10 @@ export const router = createBrowserRouter([
               {
                 path: '/cases/:number',
                 lazy: () => import('./pages/case/case-leaf.tsx'),
-                children: [{ index: true, element: <Navigate to="intake" replace /> }],
+                children: [
+                  { index: true, element: <Navigate to="intake" replace /> },
+                  { path: 'evidence', lazy: () => import('./pages/case/evidence.tsx') },
+                ],
               },
               { path: '/me', lazy: () => import('./pages/me.tsx') },
               {

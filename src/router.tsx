@@ -30,6 +30,7 @@ export const router = createBrowserRouter([
                 children: [
                   { index: true, element: <Navigate to="intake" replace /> },
                   { path: 'evidence', lazy: () => import('./pages/case/evidence.tsx') },
+                  { path: 'estimates', lazy: () => import('./pages/case/estimates.tsx') },
                 ],
               },
               { path: '/me', lazy: () => import('./pages/me.tsx') },

@@ -20,19 +20,28 @@ export const router = createBrowserRouter([
         element: <SignedIn />,
         children: [
           {
+            path: '/cases/:number/fractographs/:fractographId',
+            errorElement: <PageFailed />,
+            lazy: () => import('./pages/case/bench.tsx'),
+          },
+          {
             element: <Book />,
             errorElement: <PageFailed />,
             children: [
               { path: '/', lazy: () => import('./pages/casebook.tsx') },
+              { path: '/cases/new', lazy: () => import('./pages/open-a-case.tsx') },
               {
                 path: '/cases/:number',
                 lazy: () => import('./pages/case/case-leaf.tsx'),
                 children: [
                   { index: true, element: <Navigate to="intake" replace /> },
+                  { path: 'intake', lazy: () => import('./pages/case/intake.tsx') },
                   { path: 'evidence', lazy: () => import('./pages/case/evidence.tsx') },
                   { path: 'estimates', lazy: () => import('./pages/case/estimates.tsx') },
                 ],
               },
+              { path: '/materials', lazy: () => import('./pages/materials/materials.tsx') },
+              { path: '/materials/:materialId', lazy: () => import('./pages/materials/material.tsx') },
               { path: '/me', lazy: () => import('./pages/me.tsx') },
               {
                 path: '/laboratory',

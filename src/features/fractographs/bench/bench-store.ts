@@ -6,8 +6,7 @@ export class Bench {
   #state: BenchState;
   #marks: readonly ShownMark[] = [];
   readonly #listeners = new Set<() => void>();
-  /** Asked after a move that drew or moved something. */
-  onAsk: (ask: Ask) => void = () => undefined;
+  #answer: (ask: Ask) => void = () => undefined;
 
   constructor(first: BenchState) {
     this.#state = first;
@@ -18,6 +17,11 @@ export class Bench {
     this.#listeners.add(tell);
     return () => this.#listeners.delete(tell);
   };
+
+  /** Who is asked, after a move that drew or moved something, to keep it. */
+  answerWith(answer: (ask: Ask) => void): void {
+    this.#answer = answer;
+  }
 
   /** The marks that pointer and drawing reckon with. */
   see(marks: readonly ShownMark[]): void {
@@ -36,7 +40,7 @@ export class Bench {
       this.#state = state;
       if (ask) asks.push(ask);
     }
-    for (const ask of asks) this.onAsk(ask);
+    for (const ask of asks) this.#answer(ask);
     if (this.#state !== before) for (const tell of this.#listeners) tell();
   };
 }

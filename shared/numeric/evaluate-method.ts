@@ -1,4 +1,4 @@
-import type { RefusalCode } from '../vocabulary/refusal-codes.ts';
+import type { RefusalCode } from './refusal-codes.ts';
 import { findMethod } from './methods.ts';
 import { uncertaintyGiven } from './methods/given.ts';
 import type { Caution, GivenInputs, Method, MethodInput, Outputs } from './methods/method.ts';

@@ -1,4 +1,4 @@
-import type { RefusalCode } from '../vocabulary/refusal-codes.ts';
+import type { RefusalCode } from './refusal-codes.ts';
 
 /**
  * Thrown by a formula that has no number to give. `evaluateMethod` turns it into a named refusal, so nobody else catches it.

@@ -1,4 +1,4 @@
-import type { RefusalCode } from '../vocabulary/refusal-codes.ts';
+import type { RefusalCode } from './refusal-codes.ts';
 import { OutsideDomain } from './outside-domain.ts';
 
 type Named = Readonly<Record<string, number>>;

@@ -4,7 +4,7 @@ import type { Caution, GivenInputs, Method, Outputs } from '../numeric/methods/m
 import type { Estimated } from '../numeric/uncertainty/estimated.ts';
 import type { Budget } from '../numeric/uncertainty/propagate.ts';
 import type { OurUnit } from '../numeric/units/our-units.ts';
-import type { RefusalCode } from '../vocabulary/refusal-codes.ts';
+import type { RefusalCode } from '../numeric/refusal-codes.ts';
 import { estimateLines, type EstimateLine } from '../vocabulary/estimate-lines.ts';
 
 /** One number that came out. A stress always carries its standard uncertainty; plain ratios carry none. */

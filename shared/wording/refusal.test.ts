@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { refusalCodes } from '../vocabulary/refusal-codes.ts';
+import { refusalCodes } from '../numeric/refusal-codes.ts';
 import { refusalInWords } from './refusal.ts';
 
 describe('a refusal in words', () => {

@@ -1,4 +1,4 @@
-import type { RefusalCode } from '../vocabulary/refusal-codes.ts';
+import type { RefusalCode } from '../numeric/refusal-codes.ts';
 
 const sentences: Readonly<Record<RefusalCode, (field: string) => string>> = {
   'non-finite-input': (field) => `${field} is missing or is not a number: enter one.`,

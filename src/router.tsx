@@ -37,7 +37,9 @@ export const router = createBrowserRouter([
                   { index: true, element: <Navigate to="intake" replace /> },
                   { path: 'intake', lazy: () => import('./pages/case/intake.tsx') },
                   { path: 'evidence', lazy: () => import('./pages/case/evidence.tsx') },
+                  { path: 'fractographs', lazy: () => import('./pages/case/fractographs.tsx') },
                   { path: 'estimates', lazy: () => import('./pages/case/estimates.tsx') },
+                  { path: 'review', lazy: () => import('./pages/case/review.tsx') },
                 ],
               },
               { path: '/materials', lazy: () => import('./pages/materials/materials.tsx') },
@@ -49,6 +51,7 @@ export const router = createBrowserRouter([
                 children: [
                   { index: true, element: <Navigate to="people" replace /> },
                   { path: 'people', lazy: () => import('./pages/laboratory/people.tsx') },
+                  { path: 'instruments', lazy: () => import('./pages/laboratory/instruments.tsx') },
                   { path: 'mail', lazy: () => import('./pages/laboratory/mail.tsx') },
                   { path: 'trail', lazy: () => import('./pages/laboratory/trail.tsx') },
                 ],

@@ -1,5 +1,5 @@
 import { useQuery } from '@tanstack/react-query';
-import { NavLink, Outlet } from 'react-router-dom';
+import { NavLink, Outlet, useMatch } from 'react-router-dom';
 import { mayInLaboratory } from '#shared/rules/may.ts';
 import { laboratoryQuery } from '../../features/laboratory/api.ts';
 import { usePerson } from '../../http/session.ts';
@@ -11,8 +11,11 @@ import { EmptyState } from '../../ui/empty-state.tsx';
 export function Component() {
   const person = usePerson();
   const allowed = mayInLaboratory(person, 'keep people');
-  if (!allowed.allowed) return <NotForYou reason={allowed.reason} />;
-  return <Leaf />;
+  const isAtInstruments = useMatch('/laboratory/instruments') !== null;
+  if (allowed.allowed) return <Leaf />;
+  // Instruments and their scales are open to all of the laboratory's own people.
+  if (isAtInstruments && mayInLaboratory(person, 'read calibrations').allowed) return <InstrumentsLeaf />;
+  return <NotForYou reason={allowed.reason} />;
 }
 
 function Leaf() {
@@ -29,16 +32,35 @@ function Leaf() {
         <NavLink to="people">
           <ChapterWords numeral="i" words="People" />
         </NavLink>
+        <NavLink to="instruments">
+          <ChapterWords numeral="ii" words="Instruments" />
+        </NavLink>
         <NavLink to="mail">
           <ChapterWords
-            numeral="ii"
+            numeral="iii"
             words="Outgoing mail"
             stale
             remark={data && data.cameBack > 0 ? `${data.cameBack} came back` : null}
           />
         </NavLink>
         <NavLink to="trail">
-          <ChapterWords numeral="iii" words="Audit trail" remark={data?.trailEntries.toLocaleString('en-GB')} />
+          <ChapterWords numeral="iv" words="Audit trail" remark={data?.trailEntries.toLocaleString('en-GB')} />
+        </NavLink>
+      </Chapters>
+      <Outlet />
+    </main>
+  );
+}
+
+function InstrumentsLeaf() {
+  return (
+    <main id="content">
+      <div className="case-head">
+        <h1>Laboratory</h1>
+      </div>
+      <Chapters label="Chapters of the laboratory">
+        <NavLink to="instruments">
+          <ChapterWords numeral="ii" words="Instruments" />
         </NavLink>
       </Chapters>
       <Outlet />

@@ -31,7 +31,7 @@ export function Component() {
             <RuleHead level={2} aside={person.roles.join(', ')}>
               Your account
             </RuleHead>
-            <OwnNameForm key={own.data.version} own={own.data} />
+            <OwnNameForm own={own.data} />
             <RuleHead level={2}>Password</RuleHead>
             <OwnPasswordForm owner={own.data} />
           </Page>

@@ -1,7 +1,7 @@
 // @vitest-environment jsdom
 import { act, cleanup, renderHook } from '@testing-library/react';
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
-import { useBenchPlace, useTheme } from './theme.ts';
+import { onBookThemeChosen, takeBookTheme, useBenchPlace, useTheme } from './theme.ts';
 
 const inBenchLight = () => document.documentElement.classList.contains('bench-light');
 
@@ -24,5 +24,20 @@ describe('the theme', () => {
     expect(inBenchLight()).toBe(true);
     unmount();
     expect(inBenchLight()).toBe(false);
+  });
+
+  it('is taken from the person’s settings at the sign-in, and what they choose for the book is heard, the bench’s is not', () => {
+    const hear = vi.fn();
+    const stop = onBookThemeChosen(hear);
+    const { result } = renderHook(() => useTheme());
+    act(() => takeBookTheme('bench light'));
+    expect(inBenchLight()).toBe(true);
+    expect(hear).not.toHaveBeenCalled();
+    act(() => result.current.setTheme('paper'));
+    const bench = renderHook(() => useBenchPlace());
+    act(() => result.current.setTheme('paper'));
+    bench.unmount();
+    stop();
+    expect(hear.mock.calls).toEqual([['paper']]);
   });
 });

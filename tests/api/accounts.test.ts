@@ -77,6 +77,21 @@ describe('an invitation', () => {
     expect((await (await visitor()).get(`/invitations/${token}`)).body.code).toBe('link-spent');
   });
 
+  it('accepted while it is sent again opens the account or is refused, and never fails', async () => {
+    for (let round = 0; round < 6; round += 1) {
+      const { id, token } = await invite(`crossing-${round}@maker.example`);
+      const client = await visitor();
+      const [accepted, again] = await Promise.all([
+        client.post(`/invitations/${token}`, { password: chosen }),
+        people.administrator.client.post(`/people/${id}/invitation`),
+      ]);
+      expect([
+        [201, 409],
+        [410, 204],
+      ]).toContainEqual([accepted.status, again.status]);
+    }
+  });
+
   it('answers alike for a link never made, run out, taken back and replaced', async () => {
     const takenBack = await invite('back@maker.example');
     await people.administrator.client.delete(`/people/${takenBack.id}/invitation`);

@@ -17,7 +17,7 @@ export async function findLinkOwner(reader: Reader, link: { tokenHash: string; p
   return row?.personId ?? null;
 }
 
-/** Spends the link; of several at once only one gets the owner, the others null. */
+/** Spends the link; of several at once only one gets its owner's id, the others null. */
 export async function spendLink(tx: Transaction, link: { tokenHash: string; purpose: LinkPurpose }) {
   const [row] = await tx.db
     .update(oneTimeLinks)

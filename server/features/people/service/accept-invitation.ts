@@ -3,9 +3,9 @@ import { recordAct } from '../../../audit/record-act.ts';
 import type { VisitorContext } from '../../../http/context.ts';
 import { Problem } from '../../../http/problem.ts';
 import { presentLink, presentPerson } from '../present.ts';
-import { findPersonById, lockPerson, updatePerson, type PersonRow } from '../queries.ts';
-import { findLinkOwner, spendLink, type LinkPurpose } from '../queries/one-time-links.ts';
-import { hashOfToken, linkSpent } from './one-time-link.ts';
+import { findPersonById, noteVisit, updatePerson, type PersonRow } from '../queries.ts';
+import { findLinkOwner, type LinkPurpose } from '../queries/one-time-links.ts';
+import { hashOfToken, linkSpent, spendForOwner } from './one-time-link.ts';
 import { hashPassword } from './password.ts';
 
 /** Whom a link is for. @throws Problem link-spent, the same whatever ended it */
@@ -17,10 +17,9 @@ export async function findLinkFor(context: VisitorContext, link: { token: string
 export async function acceptInvitation(context: VisitorContext, token: string, password: string) {
   const passwordHash = await hashChosen(context, { token, purpose: 'invitation' }, password);
   return context.inTransaction(async (tx) => {
-    const personId = await spendLink(tx, { tokenHash: hashOfToken(token), purpose: 'invitation' });
-    const row = personId ? await lockPerson(tx, personId) : null;
-    if (row?.state !== 'invited') throw linkSpent();
+    const row = await spendForOwner(tx, { token, purpose: 'invitation', state: 'invited' });
     await updatePerson(tx, row, { passwordHash, state: 'open' });
+    await noteVisit(tx, row.id, tx.at);
     await recordAct(tx, row, { act: 'invitation.accepted', objectId: row.id });
     return presentPerson(row);
   });

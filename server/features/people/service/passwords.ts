@@ -13,11 +13,11 @@ import {
   updatePerson,
   type PersonRow,
 } from '../queries.ts';
-import { countLinksSince, spendLink, takeLinksBack } from '../queries/one-time-links.ts';
+import { countLinksSince, takeLinksBack } from '../queries/one-time-links.ts';
 import { endSessions } from '../queries/sessions.ts';
 import { checkPassword, hashChosen } from './accept-invitation.ts';
 import { loadPersonOf } from './load-person.ts';
-import { hashOfToken, linkSpent, makeLink } from './one-time-link.ts';
+import { makeLink, spendForOwner } from './one-time-link.ts';
 import { hashPassword, passwordFits } from './password.ts';
 import { admitTry, forgiveAddress, forgiveTry } from './sign-in-limits.ts';
 
@@ -57,9 +57,7 @@ export function sendPasswordLink(context: VisitorContext, mail: string): Promise
 export async function setPasswordByLink(context: VisitorContext, token: string, password: string): Promise<void> {
   const passwordHash = await hashChosen(context, { token, purpose: 'password' }, password);
   await context.inTransaction(async (tx) => {
-    const personId = await spendLink(tx, { tokenHash: hashOfToken(token), purpose: 'password' });
-    const row = personId ? await lockPerson(tx, personId) : null;
-    if (row?.state !== 'open') throw linkSpent();
+    const row = await spendForOwner(tx, { token, purpose: 'password', state: 'open' });
     await keepPassword(tx, row, passwordHash);
     await forgiveAddress(tx, row.mail);
   });

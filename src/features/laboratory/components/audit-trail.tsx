@@ -83,10 +83,12 @@ function Entries({ entries }: { entries: readonly TrailEntry[] }) {
         {entries.map((entry) => (
           <tr key={entry.id}>
             <td className="is-wide whitespace-nowrap text-ink-2">{formatInstant(entry.at).replace(' UTC', '')}</td>
-            <td>{entry.personName}</td>
+            <td className="whitespace-nowrap">{entry.personName}</td>
             <td className="is-wide">
               {entry.words}
-              {entry.object ? <span className="text-ink-2">: {entry.object}</span> : null}
+              {entry.object && entry.object !== entry.personName ? (
+                <span className="text-ink-2">: {entry.object}</span>
+              ) : null}
               {entry.caseNumber ? <span className="mono ml-2 text-s text-ink-2">{entry.caseNumber}</span> : null}
             </td>
             <td className="is-wide py-1">

@@ -13,6 +13,8 @@ const themes = [
 export function LookSettings({ settings }: { settings: PersonSettings }) {
   const { theme, setTheme } = useTheme();
   const { set } = useOwnActs();
+  // What was just ticked stands at once; if it is not kept, the box goes back and says why.
+  const shown = set.isPending ? { ...settings, ...set.variables } : settings;
   return (
     <div className="mt-3 mb-7 flex flex-col gap-5">
       <fieldset className="flex flex-col gap-2">
@@ -32,15 +34,13 @@ export function LookSettings({ settings }: { settings: PersonSettings }) {
       <CheckField
         label="Roomy rows"
         help="Eight pixels more for every row of a table."
-        checked={settings.roomyRows}
-        disabled={set.isPending}
+        checked={shown.roomyRows}
         onChange={(event) => set.mutate({ roomyRows: event.target.checked })}
       />
       <CheckField
         label="Letters act as keys"
         help="/ finds, ? lists the keys, G and a letter goes to a place. Turn it off if you speak to your machine."
-        checked={settings.letterKeys}
-        disabled={set.isPending}
+        checked={shown.letterKeys}
         onChange={(event) => set.mutate({ letterKeys: event.target.checked })}
       />
       {set.isError ? <FieldError id="look-error">{set.error.message}</FieldError> : null}

@@ -11,7 +11,7 @@ export function OwnNameForm({ own }: { own: OwnView }) {
   const { rename } = useOwnActs();
   const { register, handleSubmit, formState } = useForm<OwnName>({
     resolver: zodResolver(OwnName),
-    defaultValues: { name: own.name, version: own.version },
+    values: { name: own.name, version: own.version },
   });
   const submit = handleSubmit((name) => rename.mutate(name));
   return (

@@ -14,7 +14,8 @@ export function SignInForm({ onSignedIn }: { onSignedIn: (session: SessionView) 
     try {
       onSignedIn(await signIn(tried));
     } catch (failure) {
-      setError('password', { message: failure instanceof Error ? failure.message : 'The sign-in failed; try again.' });
+      const message = failure instanceof Error ? failure.message : 'The sign-in failed; try again.';
+      setError('password', { message }, { shouldFocus: true });
     }
   });
   return (

@@ -23,6 +23,8 @@ export type StartOptions = {
   clock?: () => Date;
   /** Leaves the pages out, where only the routes are asked. */
   withoutPages?: boolean;
+  /** Where the built pages stand, when not beside the server. */
+  pagesFolder?: string;
 };
 
 export type RunningServer = { address: string; parts: ContextParts; stop(): Promise<void> };
@@ -43,7 +45,7 @@ export async function startServer(settings: Settings, options: StartOptions = {}
   };
   const { app, sessions } = makeApp(parts, settings, log);
   const server = createServer({ requestTimeout: longestRequestMs }, app);
-  const closePages = options.withoutPages ? undefined : await putPagesOn(app, server, settings);
+  const closePages = options.withoutPages ? undefined : await putPagesOn(app, server, settings, options.pagesFolder);
   app.use(answerProblem);
   const sockets = await openSockets(parts, settings, log);
   const upgrades = acceptUpgrades(server, sessions, sockets.handlers);
@@ -66,9 +68,9 @@ export async function startServer(settings: Settings, options: StartOptions = {}
   return { address, parts, stop };
 }
 
-async function putPagesOn(app: Express, server: Server, settings: Settings) {
+async function putPagesOn(app: Express, server: Server, settings: Settings, folder = clientFolder()) {
   if (settings.development) return servePagesLive(app, server);
-  servePages(app, clientFolder());
+  servePages(app, folder);
   return undefined;
 }
 

@@ -5,7 +5,7 @@ const againAfterMs = 500;
 
 export type Listening = {
   /** Tells the other processes. Lost quietly while the connection is down: whoever comes back asks afresh. */
-  notify(channel: string, text: string): Promise<void>;
+  notify(channel: string, text: string): Promise<unknown>;
   stop(): Promise<void>;
 };
 
@@ -30,7 +30,7 @@ export async function listen(
     if (!stopped) again = setTimeout(() => void open(), againAfterMs);
   };
   const open = async () => {
-    const opening = new pg.Client({ connectionString: url, keepAlive: true });
+    const opening = new pg.Client({ connectionString: url, keepAlive: true, application_name: 'hacklebook news' });
     client = opening;
     opening.on('error', lost);
     opening.on('end', lost);
@@ -46,9 +46,12 @@ export async function listen(
     }
   };
   await open();
+  // one after another: a connection answers one query at a time
+  let last: Promise<unknown> = Promise.resolve();
   return {
-    notify: async (channel, text) => {
-      await client?.query('select pg_notify($1, $2)', [channel, text]).catch(() => undefined);
+    notify: (channel, text) => {
+      last = last.then(() => client?.query('select pg_notify($1, $2)', [channel, text]).catch(() => undefined));
+      return last;
     },
     stop: async () => {
       stopped = true;

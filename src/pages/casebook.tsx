@@ -35,7 +35,7 @@ export function Component() {
   };
   const isLaboratory = person.organisationKind === 'laboratory';
   const readsWork = isLaboratory && person.roles.some((role) => role !== 'administrator' && role !== 'requester');
-  const thisYear = new Date(counts.data?.asOf ?? Date.now()).getUTCFullYear();
+  const thisYear = counts.data ? new Date(counts.data.asOf).getUTCFullYear() : null;
   return (
     <main id="content" className="px-edge pb-4">
       <div className="page-head">

@@ -7,7 +7,8 @@ import { Choice, type ChoiceOption } from '#src/ui/choice.tsx';
 type FilterSentenceProps = {
   query: CasebookQuery;
   choices: CaseChoices | undefined;
-  thisYear: number;
+  /** Absent until the server has said which year it is. */
+  thisYear: number | null;
   onChange: (change: Record<string, string>) => void;
 };
 
@@ -26,6 +27,9 @@ const stalenesses: readonly ChoiceOption[] = [
   { value: '1', words: 'stale only' },
 ];
 const earlierYears = 4;
+
+const earlierThan = (year: number | null) =>
+  year === null ? [] : Array.from({ length: earlierYears }, (_, index) => String(year - 1 - index));
 
 const orderWords: Record<CasebookQuery['order'], readonly [ascending: string, descending: string]> = {
   number: ['oldest number first', 'newest first'],
@@ -49,10 +53,7 @@ export function FilterSentence({ query, choices, thisYear, onChange }: FilterSen
   ];
   const years = [
     { value: 'this', words: 'this year' },
-    ...Array.from({ length: earlierYears }, (_, index) => String(thisYear - 1 - index)).map((year) => ({
-      value: year,
-      words: year,
-    })),
+    ...earlierThan(thisYear).map((year) => ({ value: year, words: year })),
     { value: 'any', words: 'any year' },
   ];
   const [up, down] = orderWords[query.order];

@@ -154,7 +154,7 @@ describe('a mark that is taken off', () => {
 describe('an image that is bound to another scale', () => {
   it('makes both image lines stale and leaves the load line alone', async () => {
     const reckoned = await aReckonedCase();
-    await rebind(people, reckoned.id, reckoned.image, await aCalibration(people, 0.5599));
+    await rebind(people, reckoned.number, reckoned.image, await aCalibration(people, 0.5599));
     const view = await read(reckoned.path);
     expect(staleLines(view)).toEqual(['mirror', 'flaw']);
     expect(ofLine(view, 'mirror').stale?.wouldBe?.value).toBeCloseTo(356.0, 1);
@@ -180,6 +180,26 @@ describe('a constant that is replaced', () => {
   });
 });
 
+describe('a constant that is replaced while an estimate is made with it', () => {
+  it('either refuses the estimate or turns it stale', async () => {
+    const { path, materialId, toughness, marks } = await aReckonedCase();
+    const wanted = {
+      method: 'flaw.stress',
+      inputs: {
+        KIc: { from: 'constant', constantId: toughness },
+        Y: { from: 'typed', text: '1.29', uncertaintyText: '6 %' },
+        c: { from: 'mark', markId: marks.flaw, quantity: 'flaw half-axis, depth' },
+      },
+    };
+    const newer = { materialId, kind: 'toughness', value: 3.3, expanded: 0.2, supersedesId: toughness } as const;
+    const [{ status, body }] = await Promise.all([people.analyst.client.post(path, wanted), aConstant(people, newer)]);
+    if (status === 201) expect(ofLine(await read(path), 'flaw').stale).not.toBeNull();
+    else expect(body).toMatchObject({ code: 'not-valid', field: 'inputs.KIc' });
+    const late = await people.analyst.client.post(path, wanted);
+    expect(late.body).toMatchObject({ code: 'not-valid', field: 'inputs.KIc' });
+  });
+});
+
 describe('a calibration that is replaced', () => {
   it('tells a closed case what its lines would be by the one in force', async () => {
     const reckoned = await aReckonedCase();
@@ -197,7 +217,7 @@ describe('a calibration that is replaced', () => {
     const { id } = ofLine(await read(reckoned.path), 'mirror');
     const path = `${reckoned.path}/${id}/renewed`;
     expect((await people.analyst.client.post(path)).body).toMatchObject({ field: 'inputs.R' });
-    await rebind(people, reckoned.id, reckoned.image, newer);
+    await rebind(people, reckoned.number, reckoned.image, newer);
     expect((await people.analyst.client.post(path)).body).toMatchObject({ stale: null, line: 'mirror' });
   });
 });

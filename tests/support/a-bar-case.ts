@@ -1,10 +1,18 @@
 import { randomUUID } from 'node:crypto';
 import { openNewCase } from '#server/features/cases/service/open-a-case.ts';
-import { calibrationBindings, calibrations, fractographs, keptFiles } from '#server/database/tables/fractographs.ts';
-import { materialConstants, materials } from '#server/database/tables/materials.ts';
+import { calibrationBindings, fractographs, keptFiles } from '#server/database/tables/fractographs.ts';
+import { bindScale } from '#server/features/fractographs/service/bind-scale.ts';
+import {
+  enterInstrument,
+  recordCalibration,
+  replaceCalibration,
+} from '#server/features/laboratory/service/record-calibration.ts';
+import { enterMaterial } from '#server/features/materials/service/keep-material.ts';
+import { recordConstant } from '#server/features/materials/service/record-constant.ts';
+import { openCase } from '#server/rights/open-case.ts';
 import type { Transaction } from '#server/database/connection.ts';
-import { markDependentsStale, recordLineage } from '#server/lineage/lineage.ts';
-import { CaseNumber } from '#shared/contracts/ids.ts';
+import { recordLineage } from '#server/lineage/lineage.ts';
+import { CaseNumber, FractographId } from '#shared/contracts/ids.ts';
 import type { EstimateWantedInput } from '#shared/contracts/estimates.ts';
 import type { ConstantKind } from '#shared/vocabulary/constant-kinds.ts';
 import type { Admitted, aLaboratory } from './test-server.ts';
@@ -30,35 +38,24 @@ export async function aCase(people: People): Promise<{ id: string; number: CaseN
   return { id, number: CaseNumber.parse(number) };
 }
 
-/** A calibration of so many µm a pixel, ± 0.5 % at k = 2. */
-export function aCalibration(people: People, pixelSizeUm: number, supersedesId: string | null = null): Promise<string> {
-  return within(people.analyst, async (tx) => {
-    const [{ id }] = await tx.db
-      .insert(calibrations)
-      .values({
-        code: 'CAL-06',
-        way: 'graticule',
-        pixelSizeXUm: pixelSizeUm,
-        pixelSizeYUm: pixelSizeUm,
-        relativeUncertainty: 0.0025,
-        reading: {},
-        source: 'stage micrometer SM-2',
-        validFrom: '2026-02-11',
-        supersedesId,
-        madeBy: people.analyst.person.id,
-        madeAt: tx.at,
-      })
-      .returning({ id: calibrations.id });
-    if (supersedesId !== null) {
-      await markDependentsStale(tx, {
-        kind: 'calibration',
-        oldId: supersedesId,
-        newId: id,
-        why: 'CAL-06 was replaced',
-      });
-    }
-    return id;
-  });
+/** A kept calibration of so many µm a pixel, ± 0.5 % at k = 2; one that takes the place of another makes that stale. */
+export async function aCalibration(people: People, pixelSizeUm: number, replacedId: string | null = null) {
+  const { context } = people.analyst;
+  const entered = {
+    setting: '20×',
+    way: 'graticule',
+    pixelSizeXUm: pixelSizeUm,
+    expandedUncertaintyPercent: 0.5,
+    source: 'stage micrometer SM-2',
+    asFoundErrorPercent: null,
+    validFrom: '2026-02-11',
+  } as const;
+  if (replacedId !== null) {
+    const reason = 'The reference scale was found out.';
+    return (await replaceCalibration(context, replacedId, { ...entered, reason })).calibration.id;
+  }
+  const instrument = await enterInstrument(context, { name: `Microscope ${randomUUID()}`, kind: 'compound' });
+  return (await recordCalibration(context, { ...entered, instrumentId: instrument.id })).id;
 }
 
 export type Image = { id: string; bindingId: string; calibrationId: string };
@@ -93,14 +90,15 @@ export function aFractograph(
   });
 }
 
-/** Binds the image to another calibration, as the scale of an image is changed. */
-export function rebind(people: People, caseId: string, image: Image, calibrationId: string): Promise<string> {
-  return within(people.analyst, async (tx) => {
-    const binding = { caseId, fractographId: image.id, calibrationId, supersedesId: image.bindingId };
-    const newId = await insertBinding(tx, people, binding);
-    const cause = { kind: 'calibration binding', oldId: image.bindingId, newId } as const;
-    await markDependentsStale(tx, { ...cause, why: 'the scale was bound anew' });
-    return newId;
+/** Binds the image to another kept calibration. */
+export async function rebind(people: People, number: CaseNumber, image: Image, calibrationId: string): Promise<void> {
+  const { context } = people.analyst;
+  const heldCase = await openCase(context, number, 'calibrate');
+  await bindScale(context, heldCase, FractographId.parse(image.id), {
+    reading: { way: 'kept calibration', calibrationId },
+    bindingSeen: image.bindingId,
+    confirmed: true,
+    reason: 'The wrong one had been taken.',
   });
 }
 
@@ -121,13 +119,15 @@ async function insertBinding(
 }
 
 export async function aMaterial(people: People): Promise<string> {
-  return within(people.engineer, async (tx) => {
-    const [{ id }] = await tx.db
-      .insert(materials)
-      .values({ name: `Alumina ${randomUUID()}`, family: 'alumina', madeAt: tx.at })
-      .returning({ id: materials.id });
-    return id;
+  const name = `Alumina ${randomUUID()}`;
+  const { id } = await enterMaterial(people.engineer.context, {
+    name,
+    family: 'alumina',
+    route: null,
+    grainSizeUm: null,
+    note: null,
   });
+  return id;
 }
 
 type ConstantWanted = {
@@ -138,34 +138,22 @@ type ConstantWanted = {
   supersedesId?: string;
 };
 
-/** A constant with U at k = 2; one that supersedes another makes what hangs on that one stale. */
-export function aConstant(people: People, wanted: ConstantWanted): Promise<string> {
+/** A constant with U at k = 2; one that takes the place of another makes what hangs on that one stale. */
+export async function aConstant(people: People, wanted: ConstantWanted): Promise<string> {
   const { materialId, kind, value, expanded, supersedesId = null } = wanted;
-  return within(people.engineer, async (tx) => {
-    const [{ id }] = await tx.db
-      .insert(materialConstants)
-      .values({
-        materialId,
-        recordNumber: supersedesId === null ? 1 : 2,
-        kind,
-        value,
-        standardUncertainty: expanded / 2,
-        enteredText: `${value} ± ${expanded}`,
-        enteredUnit: 'MPa√m',
-        source: 'own bars of the lot',
-        sourceStanding: 'own test',
-        validFrom: '2026-01-09',
-        supersedesId,
-        madeBy: people.engineer.person.id,
-        madeAt: tx.at,
-      })
-      .returning({ id: materialConstants.id });
-    if (supersedesId !== null) {
-      const cause = { kind: 'material constant', oldId: supersedesId, newId: id } as const;
-      await markDependentsStale(tx, { ...cause, why: 'the constant was replaced' });
-    }
-    return id;
+  const { constant } = await recordConstant(people.engineer.context, materialId, {
+    kind,
+    value: `${value} MPa m½`,
+    plusMinus: String(expanded),
+    plusMinusIs: 'U',
+    source: 'own bars of the lot',
+    sourceStanding: 'own test',
+    condition: null,
+    validFrom: '2026-01-09',
+    reason: supersedesId === null ? null : 'A longer series was tested.',
+    replaces: supersedesId,
   });
+  return constant.id;
 }
 
 const upright = { x: 1500, y: 1500 };

@@ -2,10 +2,7 @@ import { useQuery } from '@tanstack/react-query';
 import { Link, useParams, useSearchParams } from 'react-router-dom';
 import type { EstimatesView } from '#shared/contracts/estimates.ts';
 import type { FractographView } from '#shared/contracts/fractographs.ts';
-import type { Answer } from '#shared/rules/may.ts';
 import { formatNumber } from '#shared/wording/quantity.ts';
-import { actsInCase } from '#src/features/cases/acts-in-case.ts';
-import { caseOf } from '#src/features/cases/api.ts';
 import { estimatesOf } from '#src/features/estimates/api.ts';
 import { ReasonedPage } from '#src/features/estimates/components/reasoned-page.tsx';
 import { fractographsOf } from '#src/features/fractographs/api.ts';
@@ -13,7 +10,6 @@ import { FigureStrip } from '#src/features/fractographs/components/figure-strip.
 import { FigureWithMarks } from '#src/features/fractographs/components/figure-with-marks.tsx';
 import { marksOf } from '#src/features/marks/api.ts';
 import { Refusal } from '#src/http/api.ts';
-import { usePerson } from '#src/http/session.ts';
 import { Button } from '#src/ui/button.tsx';
 import { EmptyState } from '#src/ui/empty-state.tsx';
 import { ErrorState } from '#src/ui/error-state.tsx';
@@ -23,6 +19,7 @@ import { LoadingState } from '#src/ui/loading-state.tsx';
 import { Page } from '#src/ui/page.tsx';
 import { RuleHead } from '#src/ui/rule-head.tsx';
 import { Spread } from '#src/ui/spread.tsx';
+import { useCase } from './case-context.ts';
 
 const seenFolio = { chapter: 'iv', words: 'What was seen', side: 'left' } as const;
 const reasonedFolio = { chapter: 'iv', words: 'What was reasoned', side: 'right' } as const;
@@ -30,23 +27,23 @@ const reasonedFolio = { chapter: 'iv', words: 'What was reasoned', side: 'right'
 /** Chapter iv: the stress at the origin by three lines of evidence, beside the figure they were read from. */
 export function Component() {
   const { number = '' } = useParams();
-  const person = usePerson();
-  const view = useQuery(caseOf(number));
+  const { case: view, acts } = useCase();
   const estimates = useQuery(estimatesOf(number));
   if (estimates.isError) return <NotRead error={estimates.error} onAgain={() => void estimates.refetch()} />;
-  if (estimates.isPending || view.data?.seenAs !== 'laboratory') return <Reading />;
-  const mayEstimate: Answer = actsInCase(person, view.data).estimate;
+  if (estimates.isPending) return <Reading />;
   return (
     <Spread>
       <Page label="What was seen" folio={seenFolio}>
-        <SeenFigure number={number} estimates={estimates.data} />
+        <div className="min-[1101px]:sticky min-[1101px]:top-4">
+          <SeenFigure number={number} estimates={estimates.data} />
+        </div>
       </Page>
       <Page label="What was reasoned" folio={reasonedFolio}>
         <ReasonedPage
           caseNumber={number}
           view={estimates.data}
-          materialId={view.data.material?.id ?? null}
-          mayEstimate={mayEstimate}
+          materialId={view.material?.id ?? null}
+          mayEstimate={acts.estimate}
         />
       </Page>
     </Spread>

@@ -9,8 +9,7 @@ import {
 import { findMethod } from '#shared/numeric/methods.ts';
 import type { Method } from '#shared/numeric/methods/method.ts';
 import { formulaWithNumbers } from '#shared/wording/formula.ts';
-import { inputParts } from '#shared/wording/input-quantity.ts';
-import { coverageFactor } from '#shared/wording/quantity.ts';
+import { coverageFactor, formatQuantity } from '#shared/wording/quantity.ts';
 import type { EstimateRow } from '../queries/estimates.ts';
 import type { InputRow } from '../queries/inputs.ts';
 import type { StalenessRow } from '../queries/staleness.ts';
@@ -112,11 +111,10 @@ function presentBudget(method: Method, stored: unknown): EstimateView['budget'] 
   });
 }
 
-/** ± of an input alone, k = 2, in the unit a length of that size is shown in. */
+/** ± of an input alone, k = 2, to two figures, in the unit a length of that size is shown in. */
 function plusMinusOf(method: Method, row: { input: string; standardUncertainty: number }): string {
-  const expanded = coverageFactor * row.standardUncertainty;
-  const { value, unit } = inputParts({ value: expanded, standardUncertainty: 0, unit: unitOf(method, row.input) });
-  return `±\u00A0${value}${unit === '' ? '' : `\u00A0${unit}`}`;
+  const expanded = { value: coverageFactor * row.standardUncertainty, unit: unitOf(method, row.input) };
+  return `±\u00A0${formatQuantity(expanded, { significantFigures: 2 })}`;
 }
 
 function formulaOf(method: Method, { row, inputs }: EstimateFound): string {

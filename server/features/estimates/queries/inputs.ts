@@ -1,6 +1,6 @@
 import { asc, eq, inArray, sql } from 'drizzle-orm';
 import { alias } from 'drizzle-orm/pg-core';
-import type { Reader } from '../../../database/connection.ts';
+import type { Reader, Transaction } from '../../../database/connection.ts';
 import { estimateInputs } from '../../../database/tables/estimates.ts';
 import { calibrationBindings, calibrations, fractographs } from '../../../database/tables/fractographs.ts';
 import { marks, markVersions, measurements } from '../../../database/tables/marks.ts';
@@ -133,4 +133,19 @@ export async function findScaleInForce(reader: Reader, bindingId: string) {
     .from(calibrations)
     .where(eq(calibrations.id, last.id));
   return scale ? { ...scale, isReplaced: last.step > 0 } : null;
+}
+
+/** Holds the material of a constant until the act is done, so that no other record comes into force meanwhile. */
+export async function holdMaterial(tx: Transaction, materialId: string): Promise<void> {
+  await tx.db.select({ id: materials.id }).from(materials).where(eq(materials.id, materialId)).for('share');
+}
+
+/** Holds the calibration an image is bound to until the act is done, so that it is not replaced meanwhile. */
+export async function holdCalibrationOf(tx: Transaction, bindingId: string): Promise<void> {
+  const [bound] = await tx.db
+    .select({ id: calibrationBindings.calibrationId })
+    .from(calibrationBindings)
+    .where(eq(calibrationBindings.id, bindingId));
+  if (!bound) return;
+  await tx.db.select({ id: calibrations.id }).from(calibrations).where(eq(calibrations.id, bound.id)).for('share');
 }

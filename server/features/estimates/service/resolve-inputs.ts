@@ -8,8 +8,9 @@ import type { Transaction } from '../../../database/connection.ts';
 import type { Context } from '../../../http/context.ts';
 import { Problem } from '../../../http/problem.ts';
 import { readMeasurement } from '../../marks/service/read-measurement.ts';
+import { loadConstant } from '../../materials/service/list-constants.ts';
 import type { HeldCase } from '../queries/estimates.ts';
-import { findScaleInForce, listConstantSources } from '../queries/inputs.ts';
+import { findScaleInForce, holdCalibrationOf, holdMaterial } from '../queries/inputs.ts';
 import type { ResolvedInput } from './resolved-input.ts';
 
 type Wanted<From extends WantedInput['from']> = Extract<WantedInput, { from: From }>;
@@ -92,8 +93,13 @@ async function resolveConstant(
   input: NumberInput,
   { constantId }: Wanted<'constant'>,
 ): Promise<ResolvedInput | string> {
-  const [constant] = await listConstantSources(tx, [constantId]);
-  if (!constant) return `${input.label}: there is no such constant; choose one from the materials.`;
+  const known = await takenOrRefused(() => loadConstant(tx, constantId));
+  if (typeof known === 'string') return `${input.label}: there is no such constant; choose one from the materials.`;
+  await holdMaterial(tx, known.materialId);
+  const constant = await loadConstant(tx, constantId);
+  if (constant.supersededById !== null) {
+    return `${input.label}: record ${constant.recordNumber} has been replaced; choose the one in force.`;
+  }
   if (!sourcesOfInput(input.name).constants.includes(constant.kind)) {
     return `${input.label} is not a ${constantKindTable[constant.kind].word}: choose a constant of the right kind.`;
   }
@@ -124,6 +130,7 @@ async function resolveMark(
   }
   const taken = await takenOrRefused(() => readMeasurement(tx, context, heldCase, { markId, quantity }));
   if (typeof taken === 'string') return `${input.label}: ${taken}`;
+  await holdCalibrationOf(tx, taken.bindingId);
   const scale = await findScaleInForce(tx, taken.bindingId);
   if (scale?.isReplaced) {
     return `${input.label}: the scale of its image has been replaced by ${scale.code ?? 'a newer one'}; bind the image to it first.`;

@@ -6,6 +6,7 @@ import { barOf } from './bar/bar-facts.ts';
 import { lineWord } from './line-words.ts';
 import { MadeOf } from './made-of.tsx';
 import { Remarks } from './remarks.tsx';
+import { SetText } from './set-text.tsx';
 import { StandingActs } from './standing-acts.tsx';
 
 type EstimateDetailProps = {
@@ -25,7 +26,7 @@ export function EstimateDetail({ estimate, caseNumber, mayEstimate, onMakeAgain 
         {lineWord[estimate.line]}, estimate {estimate.number}
       </RuleHead>
       <p className="scroll-x my-2 border-b border-rule pb-3 text-m tabular-nums">
-        <var>σ</var> = {estimate.method.symbols} = {estimate.formula}
+        <var>σ</var> = <SetText text={`${estimate.method.symbols} = ${estimate.formula}`} />
       </p>
       {bar ? <BarDrawing bar={bar} /> : null}
       <div className="mt-4 grid gap-x-8 gap-y-5 min-[1240px]:grid-cols-[minmax(0,7fr)_minmax(0,5fr)]">

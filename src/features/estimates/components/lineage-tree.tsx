@@ -1,6 +1,7 @@
 import { Link } from 'react-router-dom';
 import type { EstimateView, SourceNode } from '#shared/contracts/estimates.ts';
 import { MarginNote } from '#src/ui/margin-note.tsx';
+import { SetText } from './set-text.tsx';
 
 /** Where an estimate comes from: each input, down to the calibration or the source of a constant. */
 export function LineageTree({ estimate }: { estimate: EstimateView }) {
@@ -21,10 +22,10 @@ function Branch({ nodes }: { nodes: readonly SourceNode[] }) {
         <li key={index} className={node.stale ? 'text-iron' : undefined}>
           {node.href ? (
             <Link className="text-inherit decoration-rule" to={node.href}>
-              {node.words}
+              <SetText text={node.words} />
             </Link>
           ) : (
-            node.words
+            <SetText text={node.words} />
           )}
           {node.stale ? <span className="sr-only"> (stale)</span> : null}
           {node.from.length > 0 ? <Branch nodes={node.from} /> : null}

@@ -2,6 +2,7 @@ import type { BudgetView } from '#shared/contracts/estimates.ts';
 import { coverageFactor, formatNumber } from '#shared/wording/quantity.ts';
 import { Table } from '#src/ui/table.tsx';
 import { Th } from '#src/ui/th.tsx';
+import { SetText } from './set-text.tsx';
 import { SymbolWord } from './symbol-word.tsx';
 
 /** What the ± is made of: one ink bar an input, its share of the variance, largest first. */
@@ -25,11 +26,13 @@ export function MadeOf({ budget }: { budget: readonly BudgetView[] }) {
             <th scope="row" className="!font-normal">
               {row.label} <SymbolWord symbol={row.symbol} />
             </th>
-            <td className="num whitespace-nowrap text-ink-2">{row.plusMinus}</td>
+            <td className="num whitespace-nowrap text-ink-2">
+              <SetText text={row.plusMinus} />
+            </td>
             <td className="num whitespace-nowrap">
               ± {formatNumber(coverageFactor * row.contribution, { decimals: 1 })}
             </td>
-            <td className="min-w-[150px]">
+            <td className="whitespace-nowrap">
               <ShareBar share={row.share} />
             </td>
           </tr>
@@ -39,7 +42,7 @@ export function MadeOf({ budget }: { budget: readonly BudgetView[] }) {
   );
 }
 
-const fullBarPx = 90;
+const fullBarPx = 60;
 
 function ShareBar({ share }: { share: number }) {
   const ofHundred = share > 0 && share < 0.01 ? 'under 1 of 100' : `${Math.round(100 * share)} of 100`;

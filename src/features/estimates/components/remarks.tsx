@@ -1,5 +1,6 @@
 import type { EstimateView } from '#shared/contracts/estimates.ts';
 import { findPracticeShapeFactor } from '#shared/rules/shape-factors.ts';
+import { SetText } from './set-text.tsx';
 
 /** What to know beside the number: cautions of the method with its source, and what was said by who made it. */
 export function Remarks({ estimate }: { estimate: EstimateView }) {
@@ -33,7 +34,8 @@ export function Remarks({ estimate }: { estimate: EstimateView }) {
       )}
       {remark === '' ? null : <li>{remark}</li>}
       <li className="text-ink-2">
-        {method.title}, version {method.version}. {method.source} ({method.sourceTag}). <var>k</var> = 2.
+        {method.title}, version {method.version}. <SetText text={method.source} /> ({method.sourceTag}). <var>k</var> =
+        2.
       </li>
     </ul>
   );

@@ -8,6 +8,7 @@ import { FieldError } from '#src/ui/field-error.tsx';
 import { StaleNote } from '#src/ui/stale-note.tsx';
 import { TextArea } from '#src/ui/text-area.tsx';
 import { useEstimateActs } from '../api.ts';
+import { SetText } from './set-text.tsx';
 
 type StaleLineProps = { estimate: EstimateView; caseNumber: string; mayEstimate: Answer };
 
@@ -24,12 +25,16 @@ export function StaleLine({ estimate, caseNumber, mayEstimate }: StaleLineProps)
     <>
       {stale.wouldBe ? (
         <Button small disabled={renew.isPending} onClick={() => renew.mutate(estimate.id)}>
-          Take {change?.now ?? stale.wouldBe.text}
+          <span>
+            Take <SetText text={valueAlone(change?.now ?? stale.wouldBe.text)} />
+          </span>
         </Button>
       ) : null}
       {reason === null ? (
         <button type="button" className="button is-plain is-small" onClick={() => setReason('')}>
-          Keep {change?.was ?? estimate.origin.text}, say why
+          <span>
+            Keep <SetText text={valueAlone(change?.was ?? estimate.origin.text)} />, say why
+          </span>
         </button>
       ) : (
         <form
@@ -46,7 +51,9 @@ export function StaleLine({ estimate, caseNumber, mayEstimate }: StaleLineProps)
             onChange={(event) => setReason(event.target.value)}
           />
           <Button small type="submit" disabled={keepOld.isPending}>
-            Keep {change?.was ?? estimate.origin.text}
+            <span>
+              Keep <SetText text={valueAlone(change?.was ?? estimate.origin.text)} />
+            </span>
           </Button>
         </form>
       )}
@@ -75,7 +82,7 @@ function StaleWords({ estimate }: { estimate: EstimateView }) {
       The {line} line no longer rests on what holds: {causes}.{' '}
       {stale.changes.map((change) => (
         <span key={change.input}>
-          {change.label} was {change.was} and now reads {change.now}.{' '}
+          {change.label} was <SetText text={change.was} /> and now reads <SetText text={change.now} />.{' '}
         </span>
       ))}
       {stale.wouldBe ? (
@@ -90,4 +97,9 @@ function StaleWords({ estimate }: { estimate: EstimateView }) {
       )}
     </>
   );
+}
+
+/** What is taken or kept, short enough for a button; its ± stands in the note above. */
+function valueAlone(text: string): string {
+  return text.replace(/\u00a0±\u00a0[^\u00a0]+/, '');
 }

@@ -12,6 +12,7 @@ import { TextArea } from '#src/ui/text-area.tsx';
 import { TextField } from '#src/ui/text-field.tsx';
 import { constantsOf, materialsQuery, measurementsOf, useEstimateActs } from '../../api.ts';
 import { lineWord } from '../line-words.ts';
+import { SetText } from '../set-text.tsx';
 import { draftFrom, emptyDraft, methodsOf, numberInputs, wantedFrom, type EstimateDraft } from './draft.ts';
 import { DraftStress } from './draft-preview.tsx';
 import { InputEntry } from './input-entry.tsx';
@@ -56,7 +57,7 @@ export function EstimateForm({ caseNumber, line, again, materialId: caseMaterial
         </RuleHead>
         <SelectField
           label="Method"
-          help={`${method.formula.symbols}; ${method.source.text}`}
+          help={<SetText text={`${method.formula.symbols}; ${method.source.text}`} />}
           {...form.register('method')}
         >
           {offeredMethods.map((each) => (

@@ -1,6 +1,7 @@
 import { useFormContext, useWatch } from 'react-hook-form';
 import type { NumberInput } from '#shared/numeric/methods/method.ts';
 import { FieldError } from '#src/ui/field-error.tsx';
+import { SetText } from '../set-text.tsx';
 import { SymbolWord } from '../symbol-word.tsx';
 import { ConstantChoice } from './constant-choice.tsx';
 import { waysOf, type EstimateDraft } from './draft.ts';
@@ -23,6 +24,7 @@ export function InputEntry({ input, preview, offered }: InputEntryProps) {
     formState.touchedFields.inputs?.[input.name]?.text || formState.touchedFields.inputs?.[input.name]?.uncertaintyText;
   const error = kept ?? (preview.kind === 'wrong' && wasLeft ? preview.reason : undefined);
   const errorId = `${path}-error`;
+  const echo = preview.kind === 'empty' ? undefined : preview.echo;
   return (
     <fieldset className="min-w-0 border-t border-hairline pt-[10px]" aria-describedby={error ? errorId : undefined}>
       <legend className="float-left mb-1 flex w-full flex-wrap items-baseline justify-between gap-x-4">
@@ -42,12 +44,27 @@ export function InputEntry({ input, preview, offered }: InputEntryProps) {
         ) : null}
       </legend>
       <div className="clear-both grid gap-[6px]">
-        {from === 'typed' ? <TypedEntry input={input} isWrong={error !== undefined} /> : null}
+        {from === 'typed' ? (
+          <TypedEntry input={input} wrong={error === undefined ? null : partOf(preview)} errorId={errorId} />
+        ) : null}
         {from === 'mark' ? <ReadingChoice input={input} measurements={offered.measurements} /> : null}
         {from === 'constant' ? <ConstantChoice input={input} constants={offered.constants} /> : null}
         {error ? <FieldError id={errorId}>{error}</FieldError> : null}
-        <p className="text-s text-ink-2">{preview.kind === 'read' ? <output>{preview.echo}</output> : input.limits}</p>
+        <p className="text-s text-ink-2">
+          {echo ? (
+            <output>
+              <SetText text={echo} />
+            </output>
+          ) : (
+            <SetText text={input.limits} />
+          )}
+        </p>
       </div>
     </fieldset>
   );
+}
+
+/** Which of the two typings is wrong; the value where the server refused and the page had nothing against it. */
+function partOf(preview: InputPreview): 'value' | 'uncertainty' {
+  return preview.kind === 'wrong' ? preview.part : 'value';
 }

@@ -20,7 +20,7 @@ export type Offered = {
 /** What an input reads as it stands. */
 export type InputPreview =
   | { readonly kind: 'empty' }
-  | { readonly kind: 'wrong'; readonly reason: string }
+  | { readonly kind: 'wrong'; readonly reason: string; readonly part: 'value' | 'uncertainty'; readonly echo?: string }
   | {
       readonly kind: 'read';
       readonly given: GivenNumber;
@@ -66,10 +66,11 @@ function previewInput(input: NumberInput, entered: DraftInput, offered: Offered)
 
 function previewTyped(input: NumberInput, entered: DraftInput): InputPreview {
   const read = readTypedInput(input, entered);
-  if (read.kind === 'refused') return { kind: 'wrong', reason: read.reason };
+  if (read.kind === 'refused') return { kind: 'wrong', reason: read.reason, part: read.part };
   const { quantity, standardUncertainty, distribution } = read;
   if (standardUncertainty === undefined && input.uncertainty === 'expected') {
-    return { kind: 'wrong', reason: refusalInWords('missing-uncertainty', input.label) };
+    const reason = refusalInWords('missing-uncertainty', input.label);
+    return { kind: 'wrong', reason, part: 'uncertainty', echo: echoQuantity(quantity) };
   }
   const { value } = quantity;
   const inOurUnit = quantity.typed.unit === input.unit;
@@ -102,7 +103,7 @@ function previewReading(
   if (!reading) return { kind: 'empty' };
   const { valueMm: value, standardUncertaintyMm, way, figureNumber, boundary } = reading;
   if (value === null || standardUncertaintyMm === null) {
-    return { kind: 'wrong', reason: `Fig. ${figureNumber} is uncalibrated: give it its scale first.` };
+    return { kind: 'wrong', reason: `Fig. ${figureNumber} is uncalibrated: give it its scale first.`, part: 'value' };
   }
   const percent = percentOf(entered);
   const standardUncertainty = percent === null ? standardUncertaintyMm : (value * percent) / 100;

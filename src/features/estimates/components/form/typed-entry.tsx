@@ -1,34 +1,41 @@
-import { useFormContext } from 'react-hook-form';
+import { useFormContext, type UseFormRegisterReturn } from 'react-hook-form';
 import type { NumberInput } from '#shared/numeric/methods/method.ts';
 import { practiceShapeFactors } from '#shared/rules/shape-factors.ts';
 import { mirrorBoundaries } from '#shared/vocabulary/mirror-boundaries.ts';
 import { uncertaintyForms, uncertaintyFormWords } from '#shared/vocabulary/uncertainty-forms.ts';
+import { FieldFrame } from '#src/ui/field-frame.tsx';
+import { joinClasses } from '#src/ui/join-classes.ts';
 import { SelectField } from '#src/ui/select-field.tsx';
 import { TextField } from '#src/ui/text-field.tsx';
 import type { EstimateDraft } from './draft.ts';
 
+type TypedEntryProps = {
+  input: NumberInput;
+  /** Which of the two is wrong, told by the element under `errorId`. */
+  wrong: 'value' | 'uncertainty' | null;
+  errorId: string;
+};
+
 /** A typed input: value with unit, its uncertainty, how that is stated, and where it was read. */
-export function TypedEntry({ input, isWrong }: { input: NumberInput; isWrong: boolean }) {
+export function TypedEntry({ input, wrong, errorId }: TypedEntryProps) {
   const { register } = useFormContext<EstimateDraft>();
   const path = `inputs.${input.name}` as const;
   const isExpected = input.uncertainty === 'expected';
+  const toldBy = (part: 'value' | 'uncertainty') => (wrong === part ? errorId : null);
   return (
     <>
-      <div className={`grid gap-3 ${isExpected ? 'grid-cols-2 min-[640px]:grid-cols-[1fr_1fr_1.4fr]' : ''}`}>
-        <TextField
-          label={input.openUnit ? 'Value with unit' : 'Value'}
-          autoComplete="off"
-          aria-invalid={isWrong || undefined}
-          {...register(`${path}.text`)}
+      <div
+        className={`grid gap-3 ${isExpected ? 'grid-cols-2 min-[640px]:grid-cols-[1fr_1fr_1.3fr_1.7fr]' : 'min-[640px]:grid-cols-2'}`}
+      >
+        <EntryField
+          label={input.openUnit ? 'Value, unit' : 'Value'}
+          wrongBy={toldBy('value')}
+          field={register(`${path}.text`)}
         />
         {isExpected ? (
           <>
-            <TextField label="±, or %" autoComplete="off" {...register(`${path}.uncertaintyText`)} />
-            <SelectField
-              label="± is"
-              className="col-span-2 min-[640px]:col-span-1"
-              {...register(`${path}.uncertaintyAs`)}
-            >
+            <EntryField label="±, or %" wrongBy={toldBy('uncertainty')} field={register(`${path}.uncertaintyText`)} />
+            <SelectField label="± is" {...register(`${path}.uncertaintyAs`)}>
               {uncertaintyForms.map((form) => (
                 <option key={form} value={form}>
                   {uncertaintyFormWords[form]}
@@ -37,11 +44,34 @@ export function TypedEntry({ input, isWrong }: { input: NumberInput; isWrong: bo
             </SelectField>
           </>
         ) : null}
+        <TextField label="Read from, or why" {...register(`${path}.note`)} />
       </div>
       {input.name === 'R' || input.name === 'A' ? <BoundaryField name={input.name} /> : null}
       {input.name === 'Y' ? <PracticeValues /> : null}
-      <TextField label="Where it was read, or why it is so" {...register(`${path}.note`)} />
     </>
+  );
+}
+
+type EntryFieldProps = { label: string; wrongBy: string | null; field: UseFormRegisterReturn };
+
+/** One line of a group whose error stands under the whole group. */
+function EntryField({ label, wrongBy, field }: EntryFieldProps) {
+  return (
+    <FieldFrame label={label}>
+      {({ id }, boxClass) => (
+        <div className={joinClasses(boxClass, wrongBy !== null && 'is-wrong')}>
+          <input
+            type="text"
+            autoComplete="off"
+            {...field}
+            id={id}
+            size={1}
+            aria-invalid={wrongBy === null ? undefined : true}
+            aria-describedby={wrongBy ?? undefined}
+          />
+        </div>
+      )}
+    </FieldFrame>
   );
 }
 

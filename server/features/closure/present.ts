@@ -2,8 +2,11 @@ import type { ReviewView } from '#shared/contracts/closure.ts';
 import { CaseNumber } from '#shared/contracts/ids.ts';
 import type { Answer } from '#shared/rules/may.ts';
 import type { ReadinessPoint } from '#shared/rules/readiness.ts';
+import type { SealedPart } from '../../sealing/manifest.ts';
 import type { findClosureRow, HeldCase, listAcceptedNotes, RoundRow, SignatureRow } from './queries/closures.ts';
-import type { ContentShown } from './service/load-review.ts';
+
+/** What is sealed or would be; a part that still grows has no fingerprint yet. */
+export type ContentShown = { parts: (Omit<SealedPart, 'hash'> & { hash: string | null })[]; contentHash: string };
 
 type Standing = {
   readonly readiness: readonly ReadinessPoint[];

@@ -4,7 +4,8 @@ import type { CheckOutcome, ClosureCheckView } from '#shared/contracts/closure.t
 import { hashOfEntry } from '../../../audit/record-act.ts';
 import type { Transaction } from '../../../database/connection.ts';
 import type { Context } from '../../../http/context.ts';
-import { nothingHere, type HeldFor } from '../../../rights/open-case.ts';
+import { Problem } from '../../../http/problem.ts';
+import type { HeldFor } from '../../../rights/open-case.ts';
 import {
   compareWithPart,
   contentHashOf,
@@ -33,7 +34,8 @@ type Checked = { words: string; outcome: CheckOutcome };
 export async function checkClosure(context: Context, heldCase: HeldFor<'read'>): Promise<ClosureCheckView> {
   const { manifest, ...found } = await context.inTransaction(async (tx) => {
     const closure = await findClosureRow(tx, heldCase);
-    if (!closure) throw nothingHere();
+    if (!closure)
+      throw new Problem('wrong-state', `${heldCase.number} is not closed yet; there is no seal to look over.`);
     const manifest = Manifest.parse(closure.manifest);
     return {
       manifest,

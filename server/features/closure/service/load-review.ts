@@ -5,8 +5,8 @@ import { signatureMeanings, type SignatureMeaning } from '#shared/vocabulary/sig
 import type { Transaction } from '../../../database/connection.ts';
 import type { Context } from '../../../http/context.ts';
 import { factsOf, type HeldFor } from '../../../rights/open-case.ts';
-import { contentHashOf, Manifest, type SealedPart } from '../../../sealing/manifest.ts';
-import { presentReview } from '../present.ts';
+import { contentHashOf, Manifest } from '../../../sealing/manifest.ts';
+import { presentReview, type ContentShown } from '../present.ts';
 import {
   findClosureRow,
   listAcceptedNotes,
@@ -41,8 +41,6 @@ export function loadReview(context: Context, heldCase: HeldFor<'read'>): Promise
     });
   });
 }
-
-export type ContentShown = { parts: (Omit<SealedPart, 'hash'> & { hash: string | null })[]; contentHash: string };
 
 function sealedContent(number: string, { parts }: Manifest): ContentShown {
   const keys = new Set(contentParts.map((part) => part.key));

@@ -27,7 +27,8 @@ export const holdingOf = {
   findings: (rows: HeldRows) => {
     const newest = [...rows.findings_versions].sort((one, other) => Number(other.number) - Number(one.number)).at(0);
     const words = newest ? countWords(newest.content) : 0;
-    return listed(counted(words, 'word'), counted(standing(rows.figures).length, 'figure'));
+    const version = newest ? `version ${Number(newest.number)}` : '';
+    return listed(version, counted(words, 'word'), counted(standing(rows.figures).length, 'figure'));
   },
   trail: (rows: HeldRows) => listed(counted(rows.audit_entries.length, 'entry', 'entries')),
 } as const;

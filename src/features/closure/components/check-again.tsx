@@ -66,9 +66,8 @@ function recordDeviations({ seal, parts, files }: ClosureCheckView): Deviation[]
 
 function reckoned(count: number): string {
   if (count === 0) return 'No estimate had to be reckoned again';
-  return count === 1
-    ? 'The one estimate comes out the same from its inputs'
-    : `All ${count} estimates come out the same from their inputs`;
+  if (count === 1) return 'The one estimate comes out the same from its inputs';
+  return `${count === 2 ? 'Both' : `All ${count}`} estimates come out the same from their inputs`;
 }
 
 function AsItWas({ children }: { children: string }) {

@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { useForm, useWatch } from 'react-hook-form';
 import type { ReviewView } from '#shared/contracts/closure.ts';
 import { signatureMeanings, type SignatureMeaning } from '#shared/vocabulary/signatures.ts';
@@ -9,11 +10,17 @@ import { TextField } from '#src/ui/text-field.tsx';
 import type { ReviewActs } from '../api.ts';
 import { RefusalNote } from './refusal-note.tsx';
 
-type SignFormProps = { review: ReviewView; act: ReviewActs['sign']; meanings: readonly SignatureMeaning[] };
+type SignFormProps = {
+  review: ReviewView;
+  act: ReviewActs['sign'];
+  meanings: readonly SignatureMeaning[];
+  /** The other way out, beside the button. */
+  beside: ReactNode;
+};
 type Fields = { meaning: SignatureMeaning; password: string };
 
 /** What one's signature says, the password once more, and the button that signs exactly what stands on this page. */
-export function SignForm({ review, act, meanings }: SignFormProps) {
+export function SignForm({ review, act, meanings, beside }: SignFormProps) {
   const { register, handleSubmit, control, resetField, formState } = useForm<Fields>({
     defaultValues: { meaning: meanings[0], password: '' },
   });
@@ -48,6 +55,7 @@ export function SignForm({ review, act, meanings }: SignFormProps) {
         <Button type="submit" kind="main" disabled={act.isPending}>
           {meaning === 'approved' ? `Sign and close ${number}` : `Sign as ${meaning}`}
         </Button>
+        {beside}
       </div>
     </form>
   );

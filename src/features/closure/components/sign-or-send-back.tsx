@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { useState, type ReactNode } from 'react';
 import type { ReviewView } from '#shared/contracts/closure.ts';
 import type { Role } from '#shared/vocabulary/roles.ts';
 import type { SignatureMeaning } from '#shared/vocabulary/signatures.ts';
@@ -13,15 +13,18 @@ type SignOrSendBackProps = { review: ReviewView; acts: ReviewActs; roles: readon
 
 /** The two ways out of a review: a signature, or back with reasons; with why, where this person may do neither. */
 export function SignOrSendBack({ review, acts, roles }: SignOrSendBackProps) {
+  const [isSendingBack, setSendingBack] = useState(false);
   const meanings = meaningsFor(review);
+  const mayAsk = review.acts.sendBack.allowed && !isSendingBack;
+  const beside = mayAsk ? <Button onClick={() => setSendingBack(true)}>Send back with a reason</Button> : null;
   return (
     <>
       {meanings.length > 0 ? (
-        <SignForm key={meanings.join()} review={review} act={acts.sign} meanings={meanings} />
+        <SignForm key={meanings.join()} review={review} act={acts.sign} meanings={meanings} beside={beside} />
       ) : (
-        <ClosedSigning review={review} roles={roles} />
+        <ClosedSigning review={review} roles={roles} beside={beside} />
       )}
-      {review.acts.sendBack.allowed ? <SendBack acts={acts} /> : null}
+      {isSendingBack ? <SendBack acts={acts} onLeave={() => setSendingBack(false)} /> : null}
     </>
   );
 }
@@ -31,17 +34,20 @@ const ofRoles = (meaning: SignatureMeaning, roles: readonly Role[]) => {
   return roles.some((role) => may.includes(role));
 };
 
-function ClosedSigning({ review, roles }: { review: ReviewView; roles: readonly Role[] }) {
+type ClosedSigningProps = { review: ReviewView; roles: readonly Role[]; beside: ReactNode };
+
+function ClosedSigning({ review, roles, beside }: ClosedSigningProps) {
   const near = (['approved', 'authored', 'checked'] as const).filter((meaning) => ofRoles(meaning, roles));
   const reasons = near.map((meaning) => review.acts.sign[meaning].reason ?? '');
   return (
-    <div className="mt-4">
+    <div className="acts mt-4 items-start">
       <Button
         kind="main"
         closedBecause={reasons.length === 0 ? 'An analyst or a manager signs.' : <Reasons reasons={reasons} />}
       >
         {near.includes('approved') ? `Sign and close ${review.number}` : 'Sign what stands here'}
       </Button>
+      {beside}
     </div>
   );
 }
@@ -54,15 +60,8 @@ function Reasons({ reasons }: { reasons: readonly string[] }) {
   ));
 }
 
-function SendBack({ acts: { sendBack } }: { acts: ReviewActs }) {
-  const [isOpen, setOpen] = useState(false);
+function SendBack({ acts: { sendBack }, onLeave }: { acts: ReviewActs; onLeave: () => void }) {
   const [reasons, setReasons] = useState('');
-  if (!isOpen)
-    return (
-      <div className="acts mt-3">
-        <Button onClick={() => setOpen(true)}>Send back with a reason</Button>
-      </div>
-    );
   return (
     <form
       noValidate
@@ -87,7 +86,7 @@ function SendBack({ acts: { sendBack } }: { acts: ReviewActs }) {
         >
           Send the case back
         </Button>
-        <Button kind="plain" onClick={() => setOpen(false)}>
+        <Button kind="plain" onClick={onLeave}>
           Leave it in review
         </Button>
       </div>

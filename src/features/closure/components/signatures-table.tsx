@@ -24,7 +24,7 @@ export function SignaturesTable({ review }: { review: Pick<ReviewView, 'signatur
       <tbody>
         {signatures.map((signature) => (
           <tr key={signature.id}>
-            <th scope="row">
+            <th scope="row" className="py-2!">
               {doneWords[signature.meaning]}
               <span className="block text-s font-normal text-ink-2">{meaningWords[signature.meaning]}</span>
             </th>

@@ -98,14 +98,14 @@ export const BindableValue = z.object({
   words: z.string(),
   detail: z.string(),
   text: z.string(),
-  /** Decimals of the value as it stands, so that fewer can be asked for. */
+  /** As reckoned, so that the page can show how it will read; U is at k = 2 of the standard uncertainty. */
+  value: z.object({ value: z.number(), standardUncertainty: z.number(), unit: z.string() }),
+  /** "set aside" or "stale"; null for one that stands. A stale one is settled before it is bound. */
   standing: z.string().nullable(),
   bind: ValueToBind,
 });
 export type BindableValue = z.infer<typeof BindableValue>;
 export const BindableList = z.array(BindableValue);
-
-export const ValueShown = z.object({ parts: ValueParts, text: z.string() });
 
 const frame = z.object({
   x: z.number().nonnegative(),
@@ -182,6 +182,8 @@ export const FindingsFacts = z.object({
   /** Stale values and figures that stand in the text, each with the part it is in. */
   staleBoundValues: z.array(z.object({ id: z.uuid(), words: z.string(), part: z.string(), why: z.string() })),
   figures: z.number().int(),
+  /** The words of the text alone, so that others can look for a piece's name in it. */
+  text: z.string(),
   /** Values and figures in the text that are not of this case. */
   unresolved: z.number().int(),
   emptyParts: z.array(z.string()),

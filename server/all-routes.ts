@@ -3,6 +3,7 @@ import { caseRoutes } from './features/cases/routes.ts';
 import { estimateRoutes } from './features/estimates/routes.ts';
 import { closureRoutes } from './features/closure/routes.ts';
 import { evidenceRoutes } from './features/evidence/routes.ts';
+import { findingsRoutes } from './features/findings/routes.ts';
 import { fractographRoutes } from './features/fractographs/routes.ts';
 import { calibrationRoutes } from './features/laboratory/routes/calibrations.ts';
 import { laboratoryRoutes } from './features/laboratory/routes.ts';
@@ -21,5 +22,6 @@ export const allRoutes: readonly Route[] = [
   ...fractographRoutes,
   ...markRoutes,
   ...estimateRoutes,
+  ...findingsRoutes,
   ...closureRoutes,
 ];

@@ -16,7 +16,7 @@ export const markName = (mark: Pick<ListedMark, 'number'>) => (mark.number === n
 export function seenWords(
   mark: Pick<ListedMark, 'kind' | 'geometry' | 'certainty' | 'boundary' | 'originCode' | 'note'>,
 ) {
-  const words = [...kindWords(mark), mark.certainty === 'certain' ? '' : mark.certainty];
+  const words = [...kindWords(mark), mark.certainty];
   return words.filter((word) => word !== '').join(', ');
 }
 

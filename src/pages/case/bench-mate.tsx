@@ -21,7 +21,7 @@ export function BenchMate({ number, mate, first, firstScale, together }: BenchMa
   const { data: kept } = useQuery(marksOf(number, mate.id));
   const marks = useMemo(() => (kept ?? []).map((mark) => ({ ...mark, waiting: false })), [kept]);
   const image = { widthPx: mate.widthPx ?? 1, heightPx: mate.heightPx ?? 1 };
-  const bench = useBench(image, marks, { turnedOver: true, onAsk: askNothing });
+  const bench = useBench(image, marks, { turnedOver: true, fixed: true, onAsk: askNothing });
   useTogether({ bench: first, scale: firstScale }, { bench, scale: mate.scale }, together);
   return (
     <Face

@@ -1,51 +1,39 @@
-import { useState } from 'react';
-import type { BarReading, FractographView, ScaleBinding } from '#shared/contracts/fractographs.ts';
-import { useBindScale } from '#src/features/fractographs/api.ts';
-import { BarForm } from '#src/features/fractographs/bench/parts/bar-form.tsx';
-import { ScalePanel } from '#src/features/fractographs/bench/parts/scale-panel.tsx';
+import type { BarReading, FractographView } from '#shared/contracts/fractographs.ts';
+import type { Bench } from '#src/features/fractographs/bench/bench-store.ts';
+import { ScaleForm } from '#src/features/fractographs/components/scale-form.tsx';
 
 type BenchScaleProps = {
   number: string;
   image: FractographView;
+  bench: Bench;
   /** Readings along the bar drawn so far. */
   readings: readonly BarReading[];
-  closedBecause: string | null;
-  onReadBar: () => void;
+  onReadings: (readings: readonly BarReading[]) => void;
+  /** Puts the focus on the face, where the bar is drawn. */
+  onDraw: () => void;
   onDone: () => void;
 };
 
-/** The image's scale, and the bar read on the image itself. */
-export function BenchScale({ number, image, readings, closedBecause, onReadBar, onDone }: BenchScaleProps) {
-  const [open, setOpen] = useState(false);
-  const bind = useBindScale(number, image.id);
+/** The form of the scale, in the place of the list of marks, with the bar read on the image above it. */
+export function BenchScale({ number, image, bench, readings, onReadings, onDraw, onDone }: BenchScaleProps) {
   const leave = () => {
-    setOpen(false);
-    bind.reset();
+    onReadings([]);
+    if (bench.state().tool === 'scale bar') bench.do({ kind: 'left' }, { kind: 'left' });
     onDone();
   };
-  const send = (reading: ScaleBinding['reading']) =>
-    bind.mutate(
-      { reading, bindingSeen: image.scale?.bindingId ?? null, confirmed: bind.isError, reason: '' },
-      { onSuccess: leave },
-    );
   return (
-    <ScalePanel
-      scale={image.scale}
-      closedBecause={closedBecause}
-      onOpen={() => {
-        setOpen(true);
-        onReadBar();
-      }}
-    >
-      {open ? (
-        <BarForm
-          readings={readings}
-          onBind={send}
-          onLeave={leave}
-          fault={bind.error?.message ?? null}
-          busy={bind.isPending}
-        />
-      ) : null}
-    </ScalePanel>
+    <section className="bench-panel" aria-label="Scale of the image">
+      <ScaleForm
+        number={number}
+        image={image}
+        barReadings={readings}
+        onDrawBar={() => {
+          bench.do({ kind: 'tool picked', tool: 'scale bar' });
+          onDraw();
+        }}
+        onClearBar={() => onReadings([])}
+        onDone={leave}
+      />
+    </section>
   );
 }

@@ -43,6 +43,8 @@ export type BenchState = {
   readonly grip: Grip | null;
   readonly hiddenIds: readonly string[];
   readonly light: Light;
+  /** Marks here can be looked at and not moved. */
+  readonly fixed: boolean;
 };
 
 export const plainLight: Light = { brightness: 0, contrast: 1, inverted: false };
@@ -50,7 +52,7 @@ export const plainLight: Light = { brightness: 0, contrast: 1, inverted: false }
 // Until the stage has been measured.
 const firstStage: StageSize = { widthScreenPx: 890, heightScreenPx: 598 };
 
-export function benchState(image: ImageSize, options: { turnedOver?: boolean } = {}): BenchState {
+export function benchState(image: ImageSize, options: { turnedOver?: boolean; fixed?: boolean } = {}): BenchState {
   const scale = Math.min(firstStage.widthScreenPx / image.widthPx, firstStage.heightScreenPx / image.heightPx);
   const centrePx = { x: image.widthPx / 2, y: image.heightPx / 2 };
   return {
@@ -66,6 +68,7 @@ export function benchState(image: ImageSize, options: { turnedOver?: boolean } =
     grip: null,
     hiddenIds: [],
     light: plainLight,
+    fixed: options.fixed ?? false,
   };
 }
 

@@ -26,7 +26,8 @@ export class PointerReader {
   readonly #down = new Map<number, Down>();
 
   down(pointer: PointerSeen, state: BenchState, marks: readonly ShownMark[]): Move[] {
-    const grip = pointer.pulls || state.tool || this.#down.size > 0 ? null : gripAt(pointer, state, marks);
+    const grip =
+      pointer.pulls || state.fixed || state.tool || this.#down.size > 0 ? null : gripAt(pointer, state, marks);
     this.#down.set(pointer.id, {
       at: pointer.at,
       now: pointer.at,

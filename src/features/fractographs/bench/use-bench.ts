@@ -10,10 +10,10 @@ import type { ImageSize } from './view.ts';
 export function useBench(
   image: ImageSize,
   marks: readonly ShownMark[],
-  options: { turnedOver?: boolean; onAsk: (ask: Ask) => void },
+  options: { turnedOver?: boolean; fixed: boolean; onAsk: (ask: Ask) => void },
 ): Bench {
-  const { turnedOver, onAsk } = options;
-  const [bench] = useState(() => new Bench(benchState(image, { turnedOver })));
+  const { turnedOver, fixed, onAsk } = options;
+  const [bench] = useState(() => new Bench(benchState(image, { turnedOver, fixed })));
   useEffect(() => bench.see(marks), [bench, marks]);
   useEffect(() => bench.answerWith(onAsk), [bench, onAsk]);
   return bench;

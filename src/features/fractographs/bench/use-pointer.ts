@@ -58,5 +58,6 @@ export function usePointer(bench: Bench, element: RefObject<HTMLDivElement | nul
 
 function placeIn(element: Element, event: { clientX: number; clientY: number }): PointScreenPx {
   const { left, top } = element.getBoundingClientRect();
-  return { x: event.clientX - left, y: event.clientY - top };
+  // the stage lies within the border
+  return { x: event.clientX - left - element.clientLeft, y: event.clientY - top - element.clientTop };
 }

@@ -56,7 +56,7 @@ export function MarkClash({ clash, from, onSettle }: MarkClashProps) {
   );
 }
 
-const stateWords = (mark: ListedMark) => (mark.removed ? 'taken off' : `${seenWords(mark)}, ${mark.certainty}`);
+const stateWords = (mark: ListedMark) => (mark.removed ? 'taken off' : seenWords(mark));
 
 const placeWords = (mark: ListedMark) =>
   fieldsOf(mark.geometry)

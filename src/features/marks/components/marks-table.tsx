@@ -86,7 +86,7 @@ function MarkRow({ mark, isSelected, from, hiddenIds, onSelect, onShow }: MarkRo
       <td>
         <GlyphWord glyph={<MarkGlyph shape={mark.kind} />}>{markKindTable[mark.kind].word}</GlyphWord>
       </td>
-      <td className="max-w-[190px] truncate text-ink-2">{seenWords(mark)}</td>
+      <td className="max-w-[220px] truncate text-ink-2">{seenWords(mark)}</td>
       <td className="whitespace-nowrap">{readingWords(mark, from)}</td>
       <td className="whitespace-nowrap text-ink-2">{mark.waiting ? 'not kept yet' : mark.madeBy.name}</td>
       <td>

@@ -81,7 +81,7 @@ type LabelProps = { at: PointScreenPx; outward: PointScreenPx; words: string; in
 
 function Label({ at, outward, words, ink }: LabelProps) {
   if (words === '') return null;
-  const width = words.length * 7;
+  const width = words.length * 7 + 14;
   const x = at.x + outward.x * labelAwayScreenPx - width / 2 + (outward.x * width) / 2;
   const y = at.y + outward.y * labelAwayScreenPx - 7;
   return (

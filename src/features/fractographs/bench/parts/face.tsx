@@ -81,7 +81,7 @@ export function Face({ bench, marks, scale, tiles, name, tag, tagSide, focusRef 
           </output>
         </div>
       </div>
-      <div className="overflow-hidden" style={{ height: rulerScreenPx }}>
+      <div className="overflow-hidden bg-plate" style={{ height: rulerScreenPx }}>
         <Ruler state={state} marks={marks} scale={scale} />
       </div>
     </section>

@@ -1,7 +1,6 @@
 import { RulerIcon } from '@phosphor-icons/react/dist/csr/Ruler';
-import type { ReactNode } from 'react';
 import type { ScaleView } from '#shared/contracts/fractographs.ts';
-import { formatInstant } from '#shared/wording/dates.ts';
+import { formatDay } from '#shared/wording/dates.ts';
 import { formatNumber } from '#shared/wording/quantity.ts';
 import { Button } from '../../../../ui/button.tsx';
 import { StaleRemark } from '../../../../ui/stale-remark.tsx';
@@ -10,30 +9,29 @@ type ScalePanelProps = {
   scale: ScaleView | null;
   /** Why this person cannot give the image a scale now; null where they can. */
   closedBecause: string | null;
-  onOpen: () => void;
-  /** The open form, in its place. */
-  children?: ReactNode;
+  /** Opens the form; null while it is open. */
+  onOpen: (() => void) | null;
 };
 
 /** The scale of the image with where it is from, or that it is uncalibrated and what opens that. */
-export function ScalePanel({ scale, closedBecause, onOpen, children }: ScalePanelProps) {
+export function ScalePanel({ scale, closedBecause, onOpen }: ScalePanelProps) {
   return (
     <div className="border-t border-hairline pt-[6px] text-[14px]/[1.35]">
       <h2 className="bench-title !mb-[2px] justify-between">
         Scale <RulerIcon size={15} aria-hidden />
       </h2>
       {scale ? <ScaleWords scale={scale} /> : <p>Uncalibrated: marks are read in px, and no length comes of them.</p>}
-      {children ?? (
+      {onOpen ? (
         <p className="mt-1">
           {closedBecause ? (
             <span className="text-ink-2">{closedBecause}</span>
           ) : (
-            <Button small onClick={onOpen}>
+            <Button small kind="plain" onClick={onOpen}>
               {scale ? 'Bind another scale' : 'Bind a scale'}
             </Button>
           )}
         </p>
-      )}
+      ) : null}
     </div>
   );
 }
@@ -50,7 +48,7 @@ function ScaleWords({ scale }: { scale: ScaleView }) {
       </p>
       <p className="text-ink-2">
         {scale.code ? `${scale.code}, ` : ''}
-        {scale.source}. Bound by {scale.boundBy.name}, {formatInstant(scale.boundAt)}.
+        {scale.source}. Bound by {scale.boundBy.name}, {formatDay(scale.boundAt)}.
       </p>
       {scale.stale ? <StaleRemark>{scale.stale.why}</StaleRemark> : null}
     </>

@@ -23,13 +23,19 @@ export function smoothLine(points: readonly PointPx[]): readonly PointPx[] {
   const line: PointPx[] = [points[0]];
   for (let span = 0; span < points.length - 1; span += 1) {
     const [one, two] = [points[span], points[span + 1]];
-    const before = points[span - 1] ?? minus(times(one, 2), two);
-    const after = points[span + 2] ?? minus(times(two, 2), one);
+    // beyond its ends the line goes on bending as it did
+    const before = points[span - 1] ?? goingOn(one, two, points[span + 2] ?? two);
+    const after = points[span + 2] ?? goingOn(two, one, points[span - 1] ?? one);
     for (let step = 1; step <= stepsPerSpan; step += 1) {
       line.push(between({ before, one, two, after }, step / stepsPerSpan));
     }
   }
   return line;
+}
+
+/** The point before `first` on the parabola through three points one step apart. */
+function goingOn(first: PointPx, second: PointPx, third: PointPx): PointPx {
+  return plus(minus(times(first, 3), times(second, 3)), third);
 }
 
 type Span = { before: PointPx; one: PointPx; two: PointPx; after: PointPx };

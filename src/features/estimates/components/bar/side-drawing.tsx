@@ -6,6 +6,8 @@ const barTopPx = 40;
 const rollerPx = 5;
 const momentHeightPx = 66;
 const nmmPerNm = 1000;
+// Width of a letter of 13 px semibold, about.
+const letterPx = 6.6;
 
 /** The bar from the side to scale, on its rollers, and the moment along it. Sizes are px of screen. */
 export function SideDrawing({ bar, width }: { bar: BarFacts; width: number }) {
@@ -73,7 +75,7 @@ export function SideDrawing({ bar, width }: { bar: BarFacts; width: number }) {
       />
       <circle cx={at(bar.xMm)} cy={momentY(atOrigin)} r="3.4" fill="var(--o-mach)" />
       <OriginPoint x={at(bar.xMm)} y={originY} />
-      <OriginWords bar={bar} x={at(bar.xMm)} y={barBottom + 21} />
+      <OriginWords bar={bar} x={at(bar.xMm)} y={barBottom + 21} right={at(half) - 14} />
       <Span
         from={at(-half)}
         to={at(half)}
@@ -106,11 +108,22 @@ export function OriginPoint({ x, y }: { x: number; y: number }) {
   );
 }
 
-function OriginWords({ bar, x, y }: { bar: BarFacts; x: number; y: number }) {
+type OriginWordsProps = { bar: BarFacts; x: number; y: number; right: number };
+
+/** Beside the origin's line, on the side where the words do not run into the roller at `right`. */
+function OriginWords({ bar, x, y, right }: OriginWordsProps) {
   const sign = bar.xMm > 0 ? '+' : '';
   const words = bar.xMm === 0 ? 'origin' : `origin, x = ${sign}${formatNumber(bar.xMm)} mm`;
+  const fits = x + 12 + words.length * letterPx < right;
   return (
-    <text x={x + 12} y={y} fontSize="13" fontWeight="600" fill="var(--o-mach)">
+    <text
+      x={fits ? x + 12 : x - 12}
+      y={y}
+      textAnchor={fits ? 'start' : 'end'}
+      fontSize="13"
+      fontWeight="600"
+      fill="var(--o-mach)"
+    >
       {words}
     </text>
   );

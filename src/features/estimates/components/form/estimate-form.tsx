@@ -51,7 +51,7 @@ export function EstimateForm({ caseNumber, line, again, materialId: caseMaterial
   );
   return (
     <FormProvider {...form}>
-      <form onSubmit={(event) => void keep(event)} className="grid gap-3" noValidate>
+      <form onSubmit={(event) => void keep(event)} className="grid grid-cols-[minmax(0,1fr)] gap-3" noValidate>
         <RuleHead aside={again ? `stands in for estimate ${again.number}` : 'kept once you say so'}>
           {lineWord[line]}, {again ? 'made again' : 'a new estimate'}
         </RuleHead>

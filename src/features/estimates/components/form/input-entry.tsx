@@ -43,7 +43,7 @@ export function InputEntry({ input, preview, offered }: InputEntryProps) {
           </span>
         ) : null}
       </legend>
-      <div className="clear-both grid gap-[6px]">
+      <div className="clear-both grid grid-cols-[minmax(0,1fr)] gap-[6px]">
         {from === 'typed' ? (
           <TypedEntry input={input} wrong={error === undefined ? null : partOf(preview)} errorId={errorId} />
         ) : null}

@@ -20,7 +20,7 @@ export function ReadingChoice({ input, measurements }: ReadingChoiceProps) {
     );
   }
   return (
-    <div className="grid gap-3 min-[640px]:grid-cols-[2fr_1fr]">
+    <div className="grid gap-3 min-[640px]:grid-cols-[minmax(0,2fr)_minmax(0,1fr)] [&>*]:min-w-0">
       <SelectField label="Mark" {...register(`inputs.${input.name}.reading`)}>
         <option value="">choose a mark</option>
         {fitting.map((each) => (

@@ -25,7 +25,7 @@ export function TypedEntry({ input, wrong, errorId }: TypedEntryProps) {
   return (
     <>
       <div
-        className={`grid gap-3 ${isExpected ? 'grid-cols-2 min-[640px]:grid-cols-[1fr_1fr_1.3fr_1.7fr]' : 'min-[640px]:grid-cols-2'}`}
+        className={`grid gap-3 [&>*]:min-w-0 ${isExpected ? 'grid-cols-2 min-[640px]:grid-cols-[minmax(0,10fr)_minmax(0,10fr)_minmax(0,15fr)_minmax(0,17fr)]' : 'min-[640px]:grid-cols-2'}`}
       >
         <EntryField
           label={input.openUnit ? 'Value, unit' : 'Value'}

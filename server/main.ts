@@ -15,7 +15,7 @@ async function main(): Promise<void> {
   }
   const context = visitorContext(server.parts);
   const accounts = settings.demo
-    ? await seedDemo(server.parts, context)
+    ? await seedDemo(server.parts, context, { onProgress: (words) => process.stdout.write(`${words}\n`) })
     : await inviteFirstAdministrator(context, { ...settings, address: server.address });
   process.stdout.write(`Hacklebook is at ${server.address}\n`);
   for (const line of accounts) process.stdout.write(`  ${line}\n`);

@@ -6,6 +6,7 @@ import { countTiles, type Cut, type CutOrder } from './cut-pyramid.ts';
 import type { Examined } from './examine-image.ts';
 import type { ImageLimits } from './image-facts.ts';
 import type { ImageOrder, ImageWork } from './image-worker.ts';
+import type { DrawOrder } from './synthetic-surface/draw-to-file.ts';
 
 // A picture takes seconds; a thread still busy after this is ended with what it holds.
 const longestWorkMs = 20 * 60 * 1000;
@@ -82,4 +83,9 @@ function isMissing(error: unknown): boolean {
 /** A small picture around a point. */
 export function crop(order: CropOrder): Promise<Uint8Array> {
   return work('crop', order);
+}
+
+/** A synthetic fracture surface as a file, for the demo. */
+export function draw(order: DrawOrder): Promise<Uint8Array> {
+  return work('draw', order);
 }

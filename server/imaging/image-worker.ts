@@ -2,6 +2,7 @@ import { cropImage, type CropOrder } from './crop-image.ts';
 import { cutPyramid, type Cut, type CutOrder } from './cut-pyramid.ts';
 import { examineImage, type Examined } from './examine-image.ts';
 import type { ImageLimits } from './image-facts.ts';
+import { drawToFile, type DrawOrder } from './synthetic-surface/draw-to-file.ts';
 
 export type ImageWork = {
   readonly examine: {
@@ -10,6 +11,7 @@ export type ImageWork = {
   };
   readonly cut: { readonly asked: CutOrder; readonly gives: Cut };
   readonly crop: { readonly asked: CropOrder; readonly gives: Uint8Array };
+  readonly draw: { readonly asked: DrawOrder; readonly gives: Uint8Array };
 };
 
 export type ImageOrder = {
@@ -20,5 +22,6 @@ export type ImageOrder = {
 export default function work(order: ImageOrder): Promise<Examined | Cut | Uint8Array> {
   if (order.name === 'examine') return examineImage(order.asked.file, order.asked.limits);
   if (order.name === 'cut') return cutPyramid(order.asked);
+  if (order.name === 'draw') return drawToFile(order.asked);
   return cropImage(order.asked);
 }

@@ -44,6 +44,7 @@ export type DemoLoad = {
   inputs: Record<string, TypedInput>;
 };
 
+/** One round of estimates; a later one stands in for the earlier ones of the same lines. */
 export type DemoEstimates = {
   /** Which of the readings, from 0; absent where nothing is read from an image. */
   reading?: number;
@@ -72,6 +73,10 @@ export type DemoCase = {
   estimates: readonly DemoEstimates[];
   /** Paragraphs under the outline's headings; {load}, {mirror}, {flaw} are bound values, {fig:n} a figure. */
   findings: Readonly<Record<string, string>>;
+  /** The day its fractographs were taken, where it lay waiting; else two working days after it came. */
+  examinedOn?: string;
+  /** The day the images came to be bound to their true scale, after the findings were begun. */
+  scaleFound?: { on: string; reason: string };
   end: DemoEnd;
   /** When it went to review, and when it was closed. */
   sentOn?: string;

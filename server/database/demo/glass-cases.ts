@@ -62,7 +62,15 @@ export const glassCases: readonly DemoCase[] = [
     findings: {
       'What was asked': 'What stress the origin of strip V-31 carried, and what that says of the edge.',
       'What the surface shows': 'A surface crack with a clear mirror, mist and hackle. {fig:2}',
-      'Stress at the origin': 'By load {load}; by the mirror {mirror}; by the crack {flaw}.',
+      'Stress at the origin':
+        'By load the outer fibre carried {load}. The mirror gives {mirror}. The crack, with the toughness of the glass, gives {flaw}. Mirror at {mirror} and crack at {flaw} stand together, and the load stands apart from both.',
+      'Why it broke there':
+        'A crack of that size breaks at {flaw}, so the strip was no weaker than its crack. What the mirror says, {mirror}, fits it.',
+    },
+    examinedOn: '2026-10-01',
+    scaleFound: {
+      on: '2026-10-14',
+      reason: 'Taken with the 10× objective: the bar on the image is twice as long as 5× would show it',
     },
     end: 'drafting',
   },
@@ -139,6 +147,7 @@ export const glassCases: readonly DemoCase[] = [
       'What else is at risk': 'The second panel of the charge, which waits for consent.',
       'What to do': 'Ask for consent to break the second panel.',
     },
+    examinedOn: '2026-10-06',
     end: 'in review',
     sentOn: '2026-10-12',
   },

@@ -203,7 +203,7 @@ export const oxideCases: readonly DemoCase[] = [
     pieces: barPieces(bench),
     readings: [
       {
-        figure: 2,
+        figure: 1,
         by: oxide,
         originCode: 'A',
         certainty: 'certain',
@@ -229,7 +229,7 @@ export const oxideCases: readonly DemoCase[] = [
       'What was asked':
         'Where bar B-09 broke from, at what stress, and whether this is the flaw that makes the lot weak.',
       'What came in': 'Two halves, clean, nothing missing.',
-      'What the surface shows': 'The break started inside, at an agglomerate parted from the body round it. {fig:2}',
+      'What the surface shows': 'The break started inside, at an agglomerate parted from the body round it. {fig:1}',
       'Stress at the origin':
         'At the depth of the origin the bend test gives {load}; the mirror gives {mirror}; the agglomerate gives {flaw}. The mirror is large against the section and is read with that caution.',
       'Why it broke there': 'An agglomerate of hard powder that shrank away from the body on firing.',

@@ -172,6 +172,7 @@ export const serviceCases: readonly DemoCase[] = [
       'What the surface shows': 'An ordinary pore a little below the surface of the shoulder. {fig:2}',
       'Stress at the origin': 'The pore, with the toughness of the grade, gives {flaw}.',
     },
+    examinedOn: '2026-10-08',
     end: 'drafting',
   },
   {
@@ -221,13 +222,26 @@ export const serviceCases: readonly DemoCase[] = [
         flaw: { shapeFactor: '1.29', shapeFactorPercent: 6, sizePercent: 10 },
         remark: 'Load as the file has it, read as newtons',
       },
+      {
+        load: {
+          method: 'bend4.rect',
+          inputs: {
+            ...barInputs({ loadN: 88.35, widthMm: 3.99, depthMm: 3 }),
+            load: { text: '88.35 lbf', standardUncertainty: '1.73 %' },
+          },
+        },
+        remark: 'Mirror and flaw both stand 4.4 to 4.5 times above the load line: the file is in pounds-force',
+      },
     ],
     findings: {
       'What was asked': 'Why bar A-05 reads so weak.',
       'What the surface shows': 'An ordinary pore at the tensile surface. {fig:2}',
       'Stress at the origin':
-        'With the load read as newtons the bend test gives {load}, far below the mirror {mirror} and the flaw {flaw}.',
+        'The file gives its load without a unit. Read as newtons it stood at less than a quarter of mirror and flaw; read as pounds-force the bend test gives {load}, beside the mirror {mirror} and the flaw {flaw}.',
+      'Why it broke there': 'At an ordinary stress for its lot. The bar was not weak; the number was in another unit.',
+      'What to do': 'Tell the test house, and ask for the unit in every file.',
     },
+    examinedOn: '2026-10-07',
     end: 'drafting',
   },
   {

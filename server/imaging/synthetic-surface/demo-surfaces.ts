@@ -95,7 +95,7 @@ const VIEWS: Record<DemoCaseCode, readonly ViewRow[]> = {
     ['F1', 'whole-face', 'CAL-01', 1500, 1120, 750, -2000, 500, 'Face of F1; grains and pores, no origin found'],
     ['F2', 'mating-face', 'CAL-01', 1500, 1120, 750, -2000, 500, 'Mating face of F2; no origin found'],
     ['F2', 'whole-face', 'CAL-01', 1500, 1120, 9000, -2000, 500, 'Second face of F2; no origin found'],
-    ['F3', 'mating-face', 'CAL-01', 1500, 1120, 9000, -2000, 500, 'Face of F3; no origin found'],
+    ['F1', 'mating-face', 'CAL-01', 1500, 1120, 9000, -2000, 500, 'Second face of F1; no origin found'],
   ],
   '0012': [
     ['F1', 'whole-face', 'CAL-05', 1900, 1160, 930, 1070, 2000, 'Fracture surface through the glass, wetted side down'],

@@ -13,7 +13,8 @@ function edgeRowPx(spec: FractureSurfaceSpec, xPx: number): number {
   return spec.origin.yPx + (spec.originDepthUm - edgeFallUm(spec.tensileCurveRadiusUm, alongUm)) / spec.pixelSizeUm;
 }
 
-function isOnFace(spec: FractureSurfaceSpec, point: PointPx): boolean {
+/** Whether a point of the image lies on the broken face: above the tensile edge and inside the section. */
+export function isOnFace(spec: FractureSurfaceSpec, point: PointPx): boolean {
   if (!inImage(spec, point) || point.yPx > edgeRowPx(spec, point.xPx) + 0.5) return false;
   const { section } = spec;
   if (!section) return true;

@@ -24,8 +24,8 @@ export function readingOf(person: Person): Reading {
 export function wallOf(person: Person): SQL {
   switch (readingOf(person)) {
     case 'laboratory':
-      return sql`(not c.restricted or exists (
-        select 1 from case_people p where p.case_id = c.id and p.person_id = ${person.id}::uuid))`;
+      return sql`(not c.restricted or c.id in (
+        select p.case_id from case_people p where p.person_id = ${person.id}::uuid))`;
     case 'requester':
       return sql`c.organisation_id = ${person.organisationId}::uuid`;
     case 'administrator':
@@ -40,12 +40,12 @@ export const isStale = sql`c.id in (select s.case_id from staleness s where s.se
 
 /** A case in review that waits for this person: for their authorship, for a check, or for an approval. */
 export function waitsForSignatureOf(person: Person): SQL {
-  const signed = (meaning: string) =>
-    sql`exists (select 1 from signatures g join reviews r on r.id = g.review_id
-      where g.case_id = c.id and r.outcome is null and g.meaning = ${meaning})`;
-  const signedByMe = sql`exists (select 1 from signatures g join reviews r on r.id = g.review_id
-      where g.case_id = c.id and r.outcome is null and g.person_id = ${person.id}::uuid)`;
-  const wrote = sql`exists (select 1 from case_authors a where a.case_id = c.id and a.person_id = ${person.id}::uuid)`;
+  // Sets looked up once, not once a case: over many cases the difference is that of seconds.
+  const signedUnder = (condition: SQL) => sql`c.id in (select g.case_id from signatures g
+      join reviews r on r.id = g.review_id where r.outcome is null and ${condition})`;
+  const signed = (meaning: string) => signedUnder(sql`g.meaning = ${meaning}`);
+  const signedByMe = signedUnder(sql`g.person_id = ${person.id}::uuid`);
+  const wrote = sql`c.id in (select a.case_id from case_authors a where a.person_id = ${person.id}::uuid)`;
   const asAnalyst = person.roles.includes('analyst')
     ? sql`(${wrote} and not ${signedByMe}) or (not ${wrote} and not ${signed('checked')})`
     : sql`false`;

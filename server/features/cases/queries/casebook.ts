@@ -76,10 +76,13 @@ export async function listCasebookPage(reader: Reader, asked: Asked): Promise<Ca
   return [...rows];
 }
 
-export async function countCasebook(reader: Reader, { person, query, thisYear }: Asked): Promise<number> {
-  const { rows } = await reader.db.execute<{ total: number }>(
-    sql`select count(*)::int as total from cases c where ${filterOf(person, query, thisYear)}`,
-  );
+/** How many cases the query finds, over all pages. */
+export function casebookTotal({ person, query, thisYear }: Asked): SQL {
+  return sql`select count(*)::int as total from cases c where ${filterOf(person, query, thisYear)}`;
+}
+
+export async function countCasebook(reader: Reader, asked: Asked): Promise<number> {
+  const { rows } = await reader.db.execute<{ total: number }>(casebookTotal(asked));
   return rows[0].total;
 }
 

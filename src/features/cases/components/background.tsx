@@ -62,7 +62,9 @@ export function Background({ number, mayEdit, year }: BackgroundProps) {
                 </td>
                 <td className="is-wide py-1 leading-[1.35]">{statement.statement}</td>
                 <td className="is-wide w-[206px] text-s text-ink-2">{statement.source}</td>
-                <td className="num whitespace-nowrap text-ink-2">{formatShortDay(statement.givenOn, year)}</td>
+                <td className="num whitespace-nowrap text-ink-2" data-word="given">
+                  {formatShortDay(statement.givenOn, year)}
+                </td>
                 <td className="num">
                   {mayEdit.allowed ? (
                     <Button

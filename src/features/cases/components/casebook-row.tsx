@@ -34,9 +34,9 @@ export function CasebookTableRow({ row, asOf, oldestDays, personId }: CasebookRo
       <td className={joinClasses('is-wide', gone ? 'text-ink-3' : 'font-semibold')}>
         {row.title}
         {row.urgency === 'exposed now' ? (
-          <GlyphWord glyph={<ExposedGlyph />} className="ml-2 font-semibold text-iron">
-            exposed now
-          </GlyphWord>
+          <span className="block text-s text-iron">
+            <GlyphWord glyph={<ExposedGlyph />}>exposed now</GlyphWord>
+          </span>
         ) : null}
       </td>
       <td className="is-wide whitespace-nowrap text-ink-2 max-[1240px]:hidden narrow:!block" data-word="of">
@@ -45,10 +45,10 @@ export function CasebookTableRow({ row, asOf, oldestDays, personId }: CasebookRo
       <td className="is-state is-wide">
         <StateWord state={row.state} holdUntil={row.holdUntil} />
       </td>
-      <td className="w-[92px] whitespace-nowrap narrow:col-start-3 narrow:row-start-1">
-        <span className="mr-[9px] inline-block w-9 text-right narrow:mr-0">{formatAge(days)}</span>
+      <td className="w-[92px] whitespace-nowrap narrow:col-start-3 narrow:row-start-1 narrow:justify-self-end">
+        <span className="mr-[9px] inline-block w-9 text-right narrow:mr-0 narrow:w-auto">{formatAge(days)}</span>
         <i
-          className="inline-block h-[5px] bg-rule align-[2px] max-[1100px]:hidden"
+          className="inline-block h-[5px] bg-rule align-[2px] fold:hidden"
           style={{ width: Math.max(1, Math.round((ageBarWidthPx * days) / Math.max(1, oldestDays))) }}
         />
       </td>

@@ -3,6 +3,8 @@ import { SearchLine } from '#src/ui/search-line.tsx';
 
 type WordsSearchProps = {
   words: string;
+  /** What the words are looked for in. */
+  within: string;
   /** True where the page was opened to find something. */
   focused: boolean;
   onWords: (words: string) => void;
@@ -11,7 +13,7 @@ type WordsSearchProps = {
 const restMs = 250;
 
 /** The search line: it asks once the typing rests. */
-export function WordsSearch({ words, focused, onWords }: WordsSearchProps) {
+export function WordsSearch({ words, within, focused, onWords }: WordsSearchProps) {
   const [typed, setTyped] = useState(words);
   const [asked, setAsked] = useState(words);
   // The address was changed from elsewhere, by a tab or the way back: the line follows it.
@@ -37,7 +39,7 @@ export function WordsSearch({ words, focused, onWords }: WordsSearchProps) {
     <div ref={line} className="ml-auto w-[290px] fold:ml-0 fold:w-full">
       <SearchLine
         label="Search these cases"
-        placeholder="Number, part or what happened"
+        placeholder={within}
         value={typed}
         onChange={(event) => type(event.target.value)}
       />

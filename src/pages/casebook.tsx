@@ -52,7 +52,12 @@ export function Component() {
       {readsWork ? <CasebookTabs counts={counts.data} query={query} /> : null}
       <div className="flex flex-wrap items-baseline justify-between gap-x-6 gap-y-2 py-2">
         {readsWork ? <FilterSentence {...{ query, thisYear }} choices={choices.data} onChange={change} /> : null}
-        <WordsSearch words={query.words} focused={search.has('find')} onWords={(words) => change({ words })} />
+        <WordsSearch
+          within={readsWork ? 'Number, part or what happened' : 'Number or what was sent'}
+          words={query.words}
+          focused={search.has('find')}
+          onWords={(words) => change({ words })}
+        />
       </div>
       {page.isPending ? <LoadingState words="Reading the cases…" /> : null}
       {page.isError ? (

@@ -23,9 +23,10 @@ export async function receiveFile(
   largestFileBytes: number,
 ): Promise<ReceivedForm> {
   let file: ReceivedFile | null = null;
+  let settled: Promise<void> = Promise.resolve();
   const engine: StorageEngine = {
     _handleFile: (_request, arriving, done) => {
-      keepWhole(request, arriving.stream, storage).then(
+      settled = keepWhole(request, arriving.stream, storage).then(
         (kept) => {
           file = { ...kept, fileName: plainName(arriving.originalname) };
           done(null, {});
@@ -37,11 +38,14 @@ export async function receiveFile(
   };
   const limits = { ...smallForm, fileSize: largestFileBytes };
   const form = multer({ storage: engine, limits, defParamCharset: 'utf8' }).single('file');
-  await new Promise<void>((done, fail) =>
+  const read = new Promise<void>((done, fail) =>
     form(request, response, (error: unknown) => (error ? fail(error) : done())),
-  ).catch((error: unknown) => {
-    // Nobody is left to read this answer; it only keeps a torn line from counting as a failure of ours.
-    throw !request.complete ? new Problem('not-now', 'The connection fell away; nothing of the file was kept.') : error;
+  );
+  await read.catch(async (error: unknown) => {
+    // The form's reader gives up at the first error; what had come is taken away before that is answered.
+    await settled;
+    // Where the line is torn nobody reads the answer; it only keeps that from counting as a failure of ours.
+    throw request.complete ? error : new Problem('not-now', 'The connection fell away; nothing of the file was kept.');
   });
   const fields: Record<string, unknown> = { ...request.body };
   if (!file) throw new Problem('not-valid', 'The form holds no file.', { field: 'file' });

@@ -21,15 +21,27 @@ const slips = [
   {
     factor: 2,
     kind: 'near double',
+    words: 'nearly twice that',
     hint: 'Was it taken at half the magnification, or was the image made smaller by half?',
   },
   {
     factor: 0.5,
     kind: 'near half',
+    words: 'nearly half that',
     hint: 'Was it taken at twice the magnification, or was the image made larger by two?',
   },
-  { factor: 10, kind: 'near ten times', hint: 'Is a decimal point or a unit off by ten?' },
-  { factor: 0.1, kind: 'near a tenth', hint: 'Is a decimal point or a unit off by ten?' },
+  {
+    factor: 10,
+    kind: 'near ten times',
+    words: 'nearly ten times that',
+    hint: 'Is a decimal point or a unit off by ten?',
+  },
+  {
+    factor: 0.1,
+    kind: 'near a tenth',
+    words: 'nearly a tenth of that',
+    hint: 'Is a decimal point or a unit off by ten?',
+  },
 ] as const;
 
 /**
@@ -63,9 +75,13 @@ function sentenceOf(
   slip: (typeof slips)[number] | undefined,
 ): string {
   const sizes = `${chosen.name} gives ${sized(chosen.pixelSizeUm)}, ${other.name} ${sized(other.pixelSizeUm)}`;
-  if (slip) return `${sizes}: ${slip.kind} of it. ${slip.hint}`;
+  if (slip) return capital(`${sizes}: ${slip.words}. ${slip.hint}`);
   const percent = Math.abs(ratio - 1) * 100;
-  return `${sizes}: ${percent < 10 ? percent.toFixed(1) : percent.toFixed(0)} % apart, more than 3 %.`;
+  return capital(`${sizes}: ${percent < 10 ? percent.toFixed(1) : percent.toFixed(0)} % apart, more than 3 %.`);
+}
+
+function capital(sentence: string): string {
+  return sentence.charAt(0).toUpperCase() + sentence.slice(1);
 }
 
 function sized(pixelSizeUm: number): string {

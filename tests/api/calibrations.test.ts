@@ -136,7 +136,7 @@ describe('ways to one scale that disagree', () => {
     const { at } = await anImageOf(2560);
     const asked = await bind(people.analyst, at, typed(0.78));
     expect([asked.status, asked.body.code, asked.body.field]).toEqual([409, 'not-ready', 'confirm']);
-    expect(asked.body.message).toMatch(/near double of it/);
+    expect(asked.body.message).toMatch(/nearly twice that/);
     const noReason = await bind(people.analyst, at, typed(0.78), { confirmed: true });
     expect([noReason.status, noReason.body.field]).toEqual([422, 'reason']);
     const reason = 'The image was made smaller by half on export.';

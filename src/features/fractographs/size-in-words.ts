@@ -7,7 +7,9 @@ const steps = [
 /** A number of bytes as one says it: "412 MB", "2.4 GB". */
 export function sizeInWords(bytes: number): string {
   const step = steps.find((each) => bytes >= each.bytes * 0.9995);
-  return step ? `${(bytes / step.bytes).toFixed(step.decimals)}\u00a0${step.unit}` : `${bytes}\u00a0bytes`;
+  if (!step) return `${bytes}\u00a0bytes`;
+  const amount = bytes / step.bytes;
+  return `${amount.toFixed(amount < 10 && step.bytes > 1e3 ? 1 : step.decimals)}\u00a0${step.unit}`;
 }
 
 /** Time left as one says it, to the nearest 10 s or minute: "about 40 s". */

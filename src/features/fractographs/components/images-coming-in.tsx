@@ -9,16 +9,18 @@ type ImagesComingInProps = { list: readonly Arrival[]; arrivals: Arrivals };
 
 /** Files on their way in, each with its own line; one that fails loses none of the others. */
 export function ImagesComingIn({ list, arrivals }: ImagesComingInProps) {
-  if (list.length === 0) return null;
   const failed = list.filter(({ state }) => state === 'failed');
   const isOpen = list.some(({ state }) => state === 'waiting' || state === 'coming in');
+  // What has come in stands among the figures; its line goes once nothing is on its way any more.
+  const shown = isOpen ? list : failed;
+  if (shown.length === 0) return null;
   return (
     <section aria-label="Images coming in" className="mb-7">
       <RuleHead small aside={summaryOf(list)}>
         Images coming in
       </RuleHead>
       <div className="mt-3 flex flex-col gap-3">
-        {list.map((arrival) => (
+        {shown.map((arrival) => (
           <ArrivalLine key={arrival.id} arrival={arrival} />
         ))}
         {failed.map((arrival) => (
@@ -36,7 +38,7 @@ function ArrivalLine({ arrival }: { arrival: Arrival }) {
     waiting: 'waits for its turn',
     'coming in': `${sizeInWords(sentBytes)} of ${sizeInWords(file.size)}, ${percentOf(arrival)} %`,
     here: figure ? `here, Fig. ${figure.figureNumber}` : 'here',
-    failed: 'did not come through whole',
+    failed: `stopped at ${sizeInWords(sentBytes)} of ${sizeInWords(file.size)}`,
   } as const;
   return (
     <ProgressLine

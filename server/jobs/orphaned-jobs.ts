@@ -13,7 +13,7 @@ const lockKey = `hashtextextended('job worker ' || id, 0)`;
  * Every process holds, on one connection, a session lock named for its own workers; PostgreSQL lets it go when the process
  * is no more. Whose lock can be taken is dead, and its jobs are set free by the queue's own `force_unlock_workers`.
  */
-export function watchDeadWorkers(database: Database, log: Logger) {
+export function watchOrphanedJobs(database: Database, log: Logger) {
   const own = new Set<string>();
   let client: pg.PoolClient | null = null;
   let stopped = false;

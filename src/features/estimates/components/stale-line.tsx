@@ -77,10 +77,12 @@ function StaleWords({ estimate }: { estimate: EstimateView }) {
   const { stale, line } = estimate;
   if (!stale) return null;
   const causes = stale.causes.map((cause) => cause.why).join('; ');
+  // The word on a replaced constant says from what to what already.
+  const changes = stale.causes.every((cause) => cause.kind === 'material constant') ? [] : stale.changes;
   return (
     <>
-      The {line} line no longer rests on what holds: {causes}.{' '}
-      {stale.changes.map((change) => (
+      The {line} line no longer rests on what holds: <SetText text={causes} />.{' '}
+      {changes.map((change) => (
         <span key={change.input}>
           {change.label} was <SetText text={change.was} /> and now reads <SetText text={change.now} />.{' '}
         </span>

@@ -12,7 +12,7 @@ const ready: ReadinessFacts = {
     { number: 1, line: 'load', isSetAside: false, isStale: false },
     { number: 2, line: 'mirror', isSetAside: false, isStale: false },
   ],
-  findings: { wordCount: 120, staleBoundValues: [], unresolved: 0, emptyParts: [] },
+  findings: { isEmpty: false, staleBoundValues: [], unresolved: 0, emptyParts: [] },
 };
 
 const codesOf = (change: Partial<ReadinessFacts>) => readinessOf({ ...ready, ...change }).map((point) => point.code);
@@ -49,7 +49,7 @@ describe('a case on its way to review', () => {
       'findings-stale',
     ],
     ['with a value that points at nothing', findings({ unresolved: 1 }), 'unresolved'],
-    ['whose findings are empty', findings({ wordCount: 0, emptyParts: ['What was asked'] }), 'findings-empty'],
+    ['whose findings are empty', findings({ isEmpty: true, emptyParts: ['What was asked'] }), 'findings-empty'],
   ])('is blocked when it is one %s', (_words, change, code) => {
     const points = readinessOf({ ...ready, ...change });
     expect(points.map(({ code: found, kind }) => ({ found, kind }))).toEqual([{ found: code, kind: 'blocker' }]);

@@ -25,7 +25,9 @@ export type ReadinessFacts = {
     readonly isSetAside: boolean;
     readonly isStale: boolean;
   }[];
-  readonly findings: Pick<FindingsFacts, 'wordCount' | 'unresolved' | 'emptyParts'> & {
+  readonly findings: Pick<FindingsFacts, 'unresolved' | 'emptyParts'> & {
+    /** Nothing stands under any heading. */
+    readonly isEmpty: boolean;
     readonly staleBoundValues: readonly Pick<FindingsFacts['staleBoundValues'][number], 'words' | 'part'>[];
   };
 };
@@ -119,8 +121,8 @@ const estimateRule: Rule = ({ estimates }) => {
   ];
 };
 
-const findingsRule: Rule = ({ findings: { wordCount, staleBoundValues, unresolved, emptyParts } }) => [
-  ...ifSo(wordCount === 0, blocker('findings-empty', 'findings', 'Nothing is written in the findings.')),
+const findingsRule: Rule = ({ findings: { isEmpty, staleBoundValues, unresolved, emptyParts } }) => [
+  ...ifSo(isEmpty, blocker('findings-empty', 'findings', 'Nothing is written in the findings.')),
   ...staleBoundValues.map(({ words, part }) =>
     blocker('findings-stale', 'findings', `${words}, in “${part}”, rests on something that has changed.`),
   ),
@@ -134,7 +136,7 @@ const findingsRule: Rule = ({ findings: { wordCount, staleBoundValues, unresolve
         : `${unresolved} values in the findings have no source.`,
     ),
   ),
-  ...(wordCount === 0 ? [] : emptyParts.map((part) => note('part-empty', 'findings', `“${part}” is empty.`))),
+  ...(isEmpty ? [] : emptyParts.map((part) => note('part-empty', 'findings', `“${part}” is empty.`))),
 ];
 
 const rules: readonly Rule[] = [intakeRule, evidenceRule, fractographRule, estimateRule, findingsRule];

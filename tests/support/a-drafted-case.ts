@@ -1,6 +1,9 @@
 import { createHash, randomBytes } from 'node:crypto';
 import { Readable } from 'node:stream';
 import { fractographs, keptFiles } from '#server/database/tables/fractographs.ts';
+import { writeFindings } from '#server/features/findings/service/write-findings.ts';
+import { openCase } from '#server/rights/open-case.ts';
+import { CaseNumber } from '#shared/contracts/ids.ts';
 import { aLoadEstimate, aMaterial, aConstant, markFace } from './a-bar-case.ts';
 import { openedCase } from './cases-at-hand.ts';
 import type { Admitted, aLaboratory } from './test-server.ts';
@@ -74,5 +77,16 @@ export async function aDraftedCase(people: People): Promise<DraftedCase> {
       },
     }),
   );
+  await writeUp(analyst, number);
   return { number, id, at, imageId, sha256, marks };
+}
+
+const text = (words: string) => [{ type: 'text', text: words }];
+
+async function writeUp({ context }: Admitted, number: string): Promise<void> {
+  const heldCase = await openCase(context, CaseNumber.parse(number), 'write findings');
+  await writeFindings(context, heldCase, [
+    { type: 'heading', attrs: { level: 2 }, content: text('What the surface shows') },
+    { type: 'paragraph', content: text('The break began at machining damage on the tensile edge.') },
+  ]);
 }

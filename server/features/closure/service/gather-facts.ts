@@ -1,3 +1,4 @@
+import type { FindingsFacts } from '#shared/contracts/findings.ts';
 import type { MarkView } from '#shared/contracts/marks.ts';
 import type { OriginLies } from '#shared/vocabulary/pieces.ts';
 import { readinessOf, type ReadinessFacts, type ReadinessPoint } from '#shared/rules/readiness.ts';
@@ -6,10 +7,10 @@ import type { Context } from '../../../http/context.ts';
 import { listQuestions } from '../../cases/service/agree-questions.ts';
 import { listParts, listPieces } from '../../evidence/service/read-evidence.ts';
 import { listEstimates } from '../../estimates/service/list-estimates.ts';
+import { findFindingsFacts } from '../../findings/service/read-text.ts';
 import { listFractographs } from '../../fractographs/service/find-fractographs.ts';
 import { listCaseMarks } from '../../marks/service/list-marks.ts';
 import type { HeldCase } from '../queries/closures.ts';
-import { findFindingsFacts, type FindingsFacts } from './findings-facts.ts';
 
 /** What stands between the case and its review, read where `reader` reads: a transaction under way, or the pool. */
 export async function listReadiness(reader: Reader, context: Context, heldCase: HeldCase): Promise<ReadinessPoint[]> {
@@ -29,8 +30,13 @@ async function gatherFacts(reader: Reader, context: Context, heldCase: HeldCase)
     originsMarked: marks.filter((mark) => mark.kind === 'origin').length,
     missingPieces: missingPieces(await listPieces(reader, heldCase), findings),
     estimates: await estimateFacts(reader, heldCase),
-    findings,
+    findings: { ...findings, isEmpty: isEmptyText(findings) },
   };
+}
+
+/** Whether no line stands in the text but the titles of its empty parts. */
+function isEmptyText({ text, emptyParts }: FindingsFacts): boolean {
+  return text.split('\n').every((line) => line.trim() === '' || emptyParts.includes(line));
 }
 
 const readForLength: readonly MarkView['kind'][] = ['mirror', 'flaw outline', 'length'];

@@ -6,7 +6,7 @@ import { Problem } from '../../../http/problem.ts';
 import { writeMail } from '../../../mail/write-mail.ts';
 import { factsOf, lockCase, type HeldFor } from '../../../rights/open-case.ts';
 import { moveCase } from '../../cases/service/move-case.ts';
-import { keepFindingsVersion } from './findings-facts.ts';
+import { keepFindingsVersion } from '../../findings/service/keep-version.ts';
 import { listManagers } from '../../people/service/list-managers.ts';
 import { insertRound, listRoundRows, type HeldCase } from '../queries/closures.ts';
 import { listReadiness } from './gather-facts.ts';

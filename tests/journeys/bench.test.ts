@@ -4,12 +4,47 @@ import type { FractographView } from '#shared/contracts/fractographs.ts';
 import type { MarkView } from '#shared/contracts/marks.ts';
 import { drawFractureSurface } from '#server/imaging/synthetic-surface/draw-fracture-surface.ts';
 import { encodeFractureSurface } from '#server/imaging/synthetic-surface/encode-fracture-surface.ts';
-import type { SurfaceTruth } from '#server/imaging/synthetic-surface/surface-spec.ts';
+import type { FractureSurfaceSpec, SurfaceTruth } from '#server/imaging/synthetic-surface/surface-spec.ts';
 import { aCase } from '../support/a-bar-case.ts';
-import { aReadyImage } from '../support/an-image.ts';
+import { aReadyImage, bringIn, settled } from '../support/an-image.ts';
 import { openBrowser, pageOf, type SignedInPage } from '../support/browser.ts';
 import { builtPages } from '../support/pages.ts';
 import { aLaboratory, startTestServer, type TestServer } from '../support/test-server.ts';
+
+const aSurface: FractureSurfaceSpec = {
+  seed: 11,
+  widthPx: 1600,
+  heightPx: 1200,
+  pixelSizeUm: 0.5,
+  origin: { xPx: 800, yPx: 1080 },
+  originDepthUm: 0,
+  flaw: { kind: 'surface-crack', halfAxisDepthUm: 70, halfAxisAlongUm: 80 },
+  mirrorRadiusUm: 280,
+  scaleBarUm: 200,
+  body: 'fine',
+};
+
+const aPart = {
+  description: 'Bar',
+  serial: null,
+  drawing: null,
+  maker: null,
+  materialId: null,
+  environment: null,
+  temperatureC: 20,
+  serviceTime: 'none',
+};
+const aPiece = (partId: string) => ({
+  partId,
+  parentId: null,
+  way: 'break',
+  description: 'half of the bar',
+  mass: '6.4 g ± 0.1 g',
+  place: 'safe S2',
+  holder: 'Ana Lyst',
+  condition: null,
+  receivedOn: '2026-06-22',
+});
 
 let pages: Awaited<ReturnType<typeof builtPages>>;
 let server: TestServer;
@@ -25,18 +60,7 @@ beforeAll(async () => {
   server = await startTestServer({ withoutPages: false, pagesFolder: pages.folder });
   people = await aLaboratory(server);
   browser = await openBrowser();
-  const surface = drawFractureSurface({
-    seed: 11,
-    widthPx: 1600,
-    heightPx: 1200,
-    pixelSizeUm: 0.5,
-    origin: { xPx: 800, yPx: 1080 },
-    originDepthUm: 0,
-    flaw: { kind: 'surface-crack', halfAxisDepthUm: 70, halfAxisAlongUm: 80 },
-    mirrorRadiusUm: 280,
-    scaleBarUm: 200,
-    body: 'fine',
-  });
+  const surface = drawFractureSurface(aSurface);
   truth = surface.truth;
   number = (await aCase(people)).number;
   image = await aReadyImage(people.analyst, number, await encodeFractureSurface(surface, 'png'), 'face.png');
@@ -57,6 +81,13 @@ afterAll(async () => {
 const benchPath = () => `/cases/${number}/fractographs/${image.id}`;
 const look = (page: Page, name: string) =>
   process.env.HACKLEBOOK_LOOK ? page.screenshot({ path: `${process.env.HACKLEBOOK_LOOK}/${name}.png` }) : undefined;
+
+/** Brings a drawn surface in as the image of one face, and waits until it is ready. */
+async function aFace(ofCase: string, spec: FractureSurfaceSpec, face: { fragmentId: string; face: string }) {
+  const bytes = await encodeFractureSurface(drawFractureSurface(spec), 'png');
+  const { body } = await bringIn(people.analyst, ofCase, { name: 'face.png', bytes }, { ...face, view: 'mirror' });
+  return (await settled(people.analyst, ofCase, String(body.id))).id;
+}
 
 async function open(page: Page): Promise<void> {
   await page.goto(benchPath());
@@ -241,6 +272,34 @@ describe('reading a fracture surface on the bench', () => {
     await look(page, 'bench-bar');
     await page.getByRole('button', { name: 'Bind the scale' }).click();
     await page.getByText(/bar of 200 µm read twice/).waitFor();
+  });
+
+  it('lays the mating face beside it, turned over, so that features answer each other', async () => {
+    const matingNumber = (await aCase(people)).number;
+    const at = `/cases/${matingNumber}`;
+    const made = async (path: string, body: object) => (await people.analyst.client.post(`${at}${path}`, body)).body;
+    const part = await made('/evidence/parts', { ...aPart });
+    const [f1, f2] = [await made('/evidence/pieces', aPiece(part.id)), await made('/evidence/pieces', aPiece(part.id))];
+    const [one, other] = [
+      { fragmentId: f1.id, face: 'A' },
+      { fragmentId: f2.id, face: 'A' },
+    ];
+    const spec = { ...aSurface, widthPx: 900, heightPx: 700, origin: { xPx: 300, yPx: 600 }, mirrorRadiusUm: 120 };
+    const first = await aFace(matingNumber, spec, one);
+    await aFace(matingNumber, { ...spec, origin: { xPx: 600, yPx: 600 }, face: 'mate' }, other);
+    await made('/evidence/mates', { one, other, crack: null });
+    const { page } = ana;
+    await page.goto(`${at}/fractographs/${first}`);
+    await page.locator('[data-face="first"][data-whole="true"]').waitFor();
+    await page.locator('[data-face="mate"][data-whole="true"]').waitFor();
+    await page.locator('[data-face="first"]').focus();
+    await page.keyboard.press('+');
+    await look(page, 'bench-mates');
+    await page.keyboard.press('b');
+    await page.locator('[data-face="mate"]').waitFor({ state: 'detached' });
+    await page.keyboard.press('b');
+    await page.locator('[data-face="mate"]').waitFor();
+    await open(page);
   });
 
   it('folds at 1100 and 390 px without a sideways scroll', async () => {

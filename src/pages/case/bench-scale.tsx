@@ -22,7 +22,7 @@ export function BenchScale({ number, image, bench, readings, onReadings, onDraw,
     onDone();
   };
   return (
-    <section className="bench-panel" aria-label="Scale of the image">
+    <section className="bench-panel is-scale" aria-label="Scale of the image">
       <ScaleForm
         number={number}
         image={image}

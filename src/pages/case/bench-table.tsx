@@ -46,7 +46,7 @@ export function BenchTable({ number, figures, current, mate, kept, person, acts 
   const [readings, setReadings] = useState<readonly BarReading[]>([]);
   const [scaleOpen, setScaleOpen] = useState(search.has('scale') && acts.calibrate.allowed);
   const [viewed, setViewed] = useState<Viewed | null>(null);
-  const [mateShown, setMateShown] = useState(mate !== null);
+  const [mateShown, setMateShown] = useState(() => mate !== null && !window.matchMedia('(max-width: 640px)').matches);
   const [together, setTogether] = useState(true);
   const { data: session } = useQuery(sessionQuery);
 

@@ -206,6 +206,10 @@ export class LiveMarks {
 
   #find = (markId: string) => this.#marks.find(({ id }) => id === markId);
 
+  #with(mark: ShownMark, act: MarkAct, since: string): ShownMark {
+    return act.kind === 'draw' || act.markId !== mark.id ? mark : withAct(mark, act, { me: this.#me, since });
+  }
+
   #put(act: MarkAct): void {
     const since = new Date().toISOString();
     this.#set({ waiting: [...this.#state.waiting, { actId: crypto.randomUUID(), act, since }] });
@@ -263,7 +267,8 @@ export class LiveMarks {
       return false;
     }
     const markId = markOf(next.act);
-    const mine = this.#find(markId);
+    const seen = this.#find(markId);
+    const mine = seen && this.#state.waiting.reduce((mark, { act, since }) => this.#with(mark, act, since), seen);
     // what was done after it to the same mark was done to what never came to be
     const waiting = this.#state.waiting.filter(({ act }) => markOf(act) !== markId);
     const theirs = MarkView.safeParse(body.current);

@@ -45,7 +45,7 @@ export function Face({ bench, marks, scale, tiles, name, tag, tagSide, focusRef 
     grey: greyAt(store, state.reticle),
   });
   return (
-    <section className="flex min-w-0 flex-1 flex-col" aria-label={name}>
+    <section className="bench-face" aria-label={name}>
       <div
         {...pointer}
         ref={element}

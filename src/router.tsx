@@ -39,6 +39,7 @@ export const router = createBrowserRouter([
                   { path: 'evidence', lazy: () => import('./pages/case/evidence.tsx') },
                   { path: 'fractographs', lazy: () => import('./pages/case/fractographs.tsx') },
                   { path: 'estimates', lazy: () => import('./pages/case/estimates.tsx') },
+                  { path: 'findings', lazy: () => import('./pages/case/findings.tsx') },
                   { path: 'review', lazy: () => import('./pages/case/review.tsx') },
                 ],
               },

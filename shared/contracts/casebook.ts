@@ -47,9 +47,7 @@ const StaffRow = z.object({
   hasFractographs: z.boolean(),
   originCode: z.enum(originCodes).nullable(),
   /** The newest origin mark on a figure that is ready, and how much to show about it, image px; absent without one. */
-  picture: z
-    .object({ fractographId: z.uuid(), x: z.number(), y: z.number(), acrossPx: z.number().int() })
-    .nullable(),
+  picture: z.object({ fractographId: z.uuid(), x: z.number(), y: z.number(), acrossPx: z.number().int() }).nullable(),
   stale: z.object({ why: z.string(), since: z.iso.datetime() }).nullable(),
 });
 const FollowedRow = z.object({

@@ -228,7 +228,7 @@ describe('lengths read from marks', () => {
     expect(await whys(first.id)).toEqual(['mark m1 was moved by Ana Lyst']);
     const second = await read();
     expect(second.id).not.toBe(first.id);
-    await rebind(people, id, image, await aCalibration(people, 0.6));
+    await rebind(people, number, image, await aCalibration(people, 0.6));
     expect(await whys(second.id)).toEqual(['the scale was bound anew']);
     expect((await read()).valueMm / second.valueMm).toBeCloseTo(1.2, 9);
   });

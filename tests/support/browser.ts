@@ -19,6 +19,23 @@ export async function pageOf(
   person: Admitted,
   size = { width: 1440, height: 900 },
 ): Promise<SignedInPage> {
+  const visitor = await visitorPage(browser, address, size);
+  const { context } = visitor;
+  const token = await (await context.request.get('/api/session')).json();
+  const answer = await context.request.post('/api/session', {
+    data: { mail: person.mail, password: testPassword },
+    headers: { 'x-request-token': token.requestToken },
+  });
+  if (answer.status() !== 201) throw new Error(`not signed in: ${await answer.text()}`);
+  return visitor;
+}
+
+/** A browser of its own for someone not signed in. */
+export async function visitorPage(
+  browser: Browser,
+  address: string,
+  size = { width: 1440, height: 900 },
+): Promise<SignedInPage> {
   const context = await browser.newContext({ viewport: size, baseURL: address });
   const page = await context.newPage();
   const complaints: string[] = [];
@@ -26,11 +43,5 @@ export async function pageOf(
     if (message.type() === 'error') complaints.push(message.text());
   });
   page.on('pageerror', (error) => complaints.push(error.message));
-  const token = await (await context.request.get('/api/session')).json();
-  const answer = await context.request.post('/api/session', {
-    data: { mail: person.mail, password: testPassword },
-    headers: { 'x-request-token': token.requestToken },
-  });
-  if (answer.status() !== 201) throw new Error(`not signed in: ${await answer.text()}`);
   return { page, context, complaints };
 }

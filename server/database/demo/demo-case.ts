@@ -81,5 +81,4 @@ export type DemoCase = {
   /** When it went to review, and when it was closed. */
   sentOn?: string;
   closedOn?: string;
-  holdForLitigation?: true;
 };

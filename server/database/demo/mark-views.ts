@@ -34,9 +34,10 @@ export function marksOf(spec: FractureSurfaceSpec, reading: DemoReading): Marked
     const points = arcOf(spec, seen.at, mirrorUm / spec.pixelSizeUm, arcPoints);
     const geometry = { shape: 'chain', points, centre: seen.at } as const;
     marks.push({ ...plain, kind: 'mirror', geometry, boundary: reading.boundary });
-    const mist = truth.mirror && arcOf(spec, seen.at, truth.mirror.mistOuterRadiusPx, mistPoints);
-    if (mist && mist.length > 1 && !reading.ofBystander)
-      marks.push({ ...plain, kind: 'mist', geometry: { shape: 'chain', points: mist } });
+    // Where the outer edge is read, the mist lies inside it and is not marked again.
+    const isInner = reading.boundary === 'inner';
+    const mist = isInner && truth.mirror ? arcOf(spec, seen.at, truth.mirror.mistOuterRadiusPx, mistPoints) : [];
+    if (mist.length > 1) marks.push({ ...plain, kind: 'mist', geometry: { shape: 'chain', points: mist } });
   }
   for (const { from, to } of truth.hackle.slice(0, reading.ofBystander ? 0 : hackleRuns))
     marks.push({

@@ -114,6 +114,11 @@ export const oxideCases: readonly DemoCase[] = [
       },
       { statement: 'The box was not dropped.', standing: 'told', source: 'carrier' },
       {
+        statement: 'A claim is announced; pieces and files are kept until it is settled.',
+        standing: 'known',
+        source: 'letter through quality-manager@ostrevell.example',
+      },
+      {
         statement: 'No load other than handling before the crack.',
         standing: 'assumed',
         source: 'the ring was never mounted',
@@ -168,7 +173,6 @@ export const oxideCases: readonly DemoCase[] = [
     end: 'closed',
     sentOn: '2026-06-15',
     closedOn: '2026-06-19',
-    holdForLitigation: true,
   },
   {
     ...ordinaryAsked,

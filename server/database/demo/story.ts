@@ -38,7 +38,10 @@ export function scenesOf(hands: Hands, pixelFactor: number): Scene[] {
   });
   const drawn = [...inOrder].sort((one, other) => (one.examinedOn < other.examinedOn ? -1 : 1));
   const pictures = new DrawnAhead(drawn.flatMap(({ told }) => viewsOf(told, pixelFactor)));
-  const scenes: Scene[] = inOrder.flatMap((each) => scenesOfCase(hands, { ...each, pixelFactor, pictures }));
+  const scenes: Scene[] = drawn.flatMap((each, index) => {
+    const says = `case ${index + 1} of ${drawn.length}`;
+    return scenesOfCase(hands, { ...each, pixelFactor, pictures, says });
+  });
   scenes.push({ on: demoReplacement.on, at: '08:30', play: () => replaceScale(hands, pixelFactor) });
   return scenes.sort((one, other) => (`${one.on} ${one.at}` < `${other.on} ${other.at}` ? -1 : 1));
 }
@@ -49,9 +52,10 @@ type OneCase = {
   readonly examinedOn: string;
   readonly pixelFactor: number;
   readonly pictures: DrawnAhead;
+  readonly says: string;
 };
 
-function scenesOfCase(hands: Hands, { told, receivedOn, examinedOn, pixelFactor, pictures }: OneCase): Scene[] {
+function scenesOfCase(hands: Hands, { told, receivedOn, examinedOn, pixelFactor, pictures, says }: OneCase): Scene[] {
   const views = viewsOf(told, pixelFactor);
   const { sentOn, closedOn, scaleFound } = told;
   const writtenOn = sentOn ? workingDay(sentOn, -1) : workingDay(examinedOn, 6);
@@ -62,7 +66,7 @@ function scenesOfCase(hands: Hands, { told, receivedOn, examinedOn, pixelFactor,
       on: examinedOn,
       at: '09:30',
       play: () => bringInViews(hands, { told, views, pictures }),
-      says: `case ${Number(told.code)} of ${demoCases.length}`,
+      says,
     },
     ...readingScenes(hands, { told, views, examinedOn }),
   ];

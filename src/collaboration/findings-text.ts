@@ -64,6 +64,7 @@ export class FindingsText {
     this.#socket = new HocuspocusProviderWebsocket({
       url: `${scheme}://${window.location.host}/sockets/findings`,
       delay: 500,
+      minDelay: 250,
       maxDelay: 5000,
     });
     this.provider = new HocuspocusProvider({

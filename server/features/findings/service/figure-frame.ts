@@ -3,7 +3,9 @@ import { outline, type FramePx } from '#shared/rules/marks-to-svg.ts';
 
 // Figures of the text share one shape, so that pages of them stand in rows.
 const heightOverWidth = 0.62;
-const widthOfFigurePx = 1200;
+// Strokes and words have their size at this width; the picture under them is finer by `sharpness`.
+const widthOfFigurePx = 400;
+export const sharpness = 3;
 // Marks keep this share of the frame's edge free; one point alone does not fill it with a few pixels.
 const marginShare = 0.16;
 const leastAcrossPx = 240;

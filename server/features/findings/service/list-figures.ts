@@ -8,7 +8,7 @@ import { nothingHere } from '../../../rights/open-case.ts';
 import { findCrop } from '../../fractographs/service/read-pictures.ts';
 import type { HeldCase } from '../queries/bound-values.ts';
 import { listFigureMarks, listFigureRows, listFigureScales, type FigureRow } from '../queries/figures.ts';
-import { drawnSize, frameAround } from './figure-frame.ts';
+import { drawnSize, frameAround, sharpness } from './figure-frame.ts';
 
 /** The figures of the text, as they were drawn; stale where a mark or a scale has changed since. */
 export async function listFigures(reader: Reader, heldCase: HeldCase): Promise<FigureView[]> {
@@ -54,8 +54,8 @@ export async function drawFigure(context: Context, heldCase: HeldCase, id: strin
       x: framePx.x + framePx.width / 2,
       y: framePx.y + framePx.height / 2,
       across: framePx.width,
-      width: size.widthPx,
-      height: size.heightPx,
+      width: size.widthPx * sharpness,
+      height: size.heightPx * sharpness,
     },
   );
   const read = async () => {

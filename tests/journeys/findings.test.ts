@@ -182,17 +182,25 @@ describe('the findings on two pages at once', () => {
     await look(page, 'findings-settled');
   });
 
-  it('keep what is typed without a connection, and say so', async () => {
-    const page = ana.page;
+  it('keep what is typed without a connection, say so, and send it once there is one', async () => {
+    let isCut = false;
+    const cuts: (() => Promise<void>)[] = [];
+    await ana.page.routeWebSocket(/sockets\/findings/, (socket) => {
+      if (isCut) return void socket.close();
+      socket.connectToServer();
+      cuts.push(() => socket.close());
+    });
+    const page = await open(ana);
     await under(page, 'What was asked');
-    const offline = await page.context().newCDPSession(page);
-    await page.context().setOffline(true);
-    await page.evaluate(() => window.dispatchEvent(new Event('offline')));
-    await offline.detach();
+    isCut = true;
+    await Promise.all(cuts.map((cut) => cut()));
     await page.keyboard.type('Why did it break? ');
-    await page.context().setOffline(false);
+    await page.getByText('Not kept yet: no connection').waitFor();
+    expect((await factsNow()).text).not.toContain('Why did it break?');
+    isCut = false;
     await kept(page);
     expect((await factsNow()).text).toContain('Why did it break?');
+    await engineer.page.locator('.findings-prose').getByText('Why did it break?').waitFor();
   });
 
   it('are only read by the manager', async () => {

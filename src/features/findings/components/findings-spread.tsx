@@ -106,11 +106,18 @@ function useEditable(editor: Editor, isWritable: boolean): void {
   }, [editor, isWritable]);
 }
 
+/** Where this person writes: nowhere until the caret has once been set, and still there while a dialog is open. */
 function useOwnPart(editor: Editor, text: FindingsText): void {
+  const [hasBegun, setHasBegun] = useState(false);
+  useEffect(() => {
+    const begin = () => setHasBegun(true);
+    editor.on('focus', begin);
+    return () => void editor.off('focus', begin);
+  }, [editor]);
   const part = useEditorState({
     editor,
     selector: ({ editor: current }) => {
-      if (!current.isEditable || !current.isFocused) return null;
+      if (!current.isEditable || !hasBegun) return null;
       return partAt(outlineOf(current.state.doc).parts, current.state.selection.from);
     },
   });

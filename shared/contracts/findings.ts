@@ -64,8 +64,8 @@ export const ValueToBind = z.discriminatedUnion('sourceKind', [
 ]);
 export type ValueToBind = z.infer<typeof ValueToBind>;
 
-/** A value in its parts, each already text; ± is at k = 2. */
-export const ValueParts = z.object({ value: z.string(), plusMinus: z.string().nullable(), unit: z.string() });
+/** A value in its parts, each already text; never without its ±, at k = 2. */
+export const ValueParts = z.object({ value: z.string(), plusMinus: z.string().min(1), unit: z.string() });
 export type ValueParts = z.infer<typeof ValueParts>;
 
 export const BoundValueView = z.object({

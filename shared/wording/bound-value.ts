@@ -27,7 +27,7 @@ export function boundParts(source: ValueOfSource, format: ValueFormat): ValuePar
 
 /** "369 ± 27 MPa", never broken over lines. */
 export function boundText({ value, plusMinus, unit }: ValueParts): string {
-  const number = plusMinus === null ? value : `${value}${noBreakSpace}±${noBreakSpace}${plusMinus}`;
+  const number = `${value}${noBreakSpace}±${noBreakSpace}${plusMinus}`;
   return unit === '' ? number : `${number}${noBreakSpace}${unit}`;
 }
 

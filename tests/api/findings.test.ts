@@ -23,7 +23,6 @@ import {
 } from '#tests/support/a-bar-case.ts';
 import { aReadyImage, anImage } from '#tests/support/an-image.ts';
 import { closeByHand } from '#tests/support/close-by-hand.ts';
-import { stressesWithoutInterval } from '#tests/support/stresses-without-interval.ts';
 import { aLaboratory, startTestServer, type TestServer } from '#tests/support/test-server.ts';
 
 let server: TestServer;
@@ -123,7 +122,7 @@ describe('a value bound into the findings', () => {
     expect(plain(constant.text)).toBe('8.50 ± 0.60 MPa m½');
     expect(load.words).toBe('Stress at the origin, load line');
     expect(radius.sourceWords).toBe('mark m2, Fig. 1');
-    expect(stressesWithoutInterval(await valuesOf(bar))).toEqual([]);
+    for (const { text: said } of await valuesOf(bar)) expect(said).toContain('±');
   });
 
   it('is offered in a list with what it says now', async () => {

@@ -88,7 +88,10 @@ export const CaseView = z.object({
   counts: z.object({
     fractographs: z.number().int(),
     estimates: z.number().int(),
+    /** Estimates that rest on something since replaced. */
     stale: z.number().int(),
+    /** Values bound in the findings of which the same is true. */
+    staleInText: z.number().int(),
   }),
   version: z.number().int(),
   asOf: z.iso.datetime(),

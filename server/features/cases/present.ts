@@ -43,7 +43,7 @@ export function presentCase(
   beside: { namedPeople: { id: string; name: string }[]; asOf: Date },
 ): CaseAnswer {
   const { title, summary, kind, state, withdrawnReason, urgency, restricted, authorIds, scope, version } = row;
-  const { sealNumber, fractographs, estimates, stale } = names;
+  const { sealNumber, fractographs, estimates, stale, staleInText } = names;
   return {
     seenAs: 'laboratory',
     ...{ title, summary, kind, state, withdrawnReason, urgency, restricted, authorIds, scope, version, sealNumber },
@@ -60,7 +60,7 @@ export function presentCase(
     receivedAt: row.receivedAt.toISOString(),
     stateSince: row.stateSince.toISOString(),
     closedAt: row.closedAt?.toISOString() ?? null,
-    counts: { fractographs, estimates, stale },
+    counts: { fractographs, estimates, stale, staleInText },
     asOf: beside.asOf.toISOString(),
   };
 }

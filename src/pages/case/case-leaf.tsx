@@ -70,7 +70,7 @@ export function Component() {
               numeral={numeral}
               words={words}
               remark={remarkOf(to, view)}
-              stale={to === 'intake' || (to === 'estimates' && view.counts.stale > 0)}
+              stale={to === 'intake' || staleIn(to, view) > 0}
             />
           </NavLink>
         ))}
@@ -85,8 +85,14 @@ export function Component() {
 function remarkOf(chapter: string, { urgency, counts }: CaseView): ReactNode {
   if (chapter === 'intake' && urgency === 'exposed now') return 'exposed now';
   if (chapter === 'fractographs') return counts.fractographs || null;
-  if (chapter === 'estimates' && counts.stale > 0) return `${counts.stale} stale`;
+  const stale = staleIn(chapter, { counts });
+  if (stale > 0) return `${stale} stale`;
   return chapter === 'estimates' ? counts.estimates || null : null;
+}
+
+function staleIn(chapter: string, { counts }: Pick<CaseView, 'counts'>): number {
+  if (chapter === 'estimates') return counts.stale;
+  return chapter === 'findings' ? counts.staleInText : 0;
 }
 
 /** 1 to 7 go to the chapters; off while typing and on the bench. */

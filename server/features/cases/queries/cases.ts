@@ -1,4 +1,4 @@
-import { eq, sql } from 'drizzle-orm';
+import { eq, sql, type SQL } from 'drizzle-orm';
 import type { Reader, Transaction } from '../../../database/connection.ts';
 import { staleness } from '../../../database/tables/acts.ts';
 import { casePeople, cases } from '../../../database/tables/cases.ts';
@@ -33,8 +33,8 @@ export async function loadCaseNames(reader: Reader, id: string) {
       sealNumber: closures.sealNumber,
       fractographs: countOf(fractographs, id),
       estimates: countOf(estimates, id),
-      stale: sql<number>`(select count(distinct s.record_id)::int from ${staleness} s
-        where s.case_id = ${id}::uuid and s.settled_at is null)`,
+      stale: staleOf(id, sql`'estimate'`, sql`estimates`),
+      staleInText: staleOf(id, sql`'bound value'`, sql`bound_values`),
     })
     .from(cases)
     .innerJoin(organisations, eq(cases.organisationId, organisations.id))
@@ -62,4 +62,11 @@ export async function replaceNamedPeople(tx: Transaction, caseId: string, person
   await tx.db.delete(casePeople).where(eq(casePeople.caseId, caseId));
   if (personIds.length === 0) return;
   await tx.db.insert(casePeople).values(personIds.map((personId) => ({ caseId, personId, addedAt: tx.at })));
+}
+
+/** How many records of a kind are stale and neither settled nor replaced by a newer one. */
+function staleOf(caseId: string, kind: SQL, table: SQL): SQL<number> {
+  return sql<number>`(select count(distinct s.record_id)::int from ${staleness} s
+    where s.case_id = ${caseId}::uuid and s.settled_at is null and s.record_kind = ${kind}
+      and not exists (select from ${table} newer where newer.supersedes_id = s.record_id))`;
 }

@@ -4,7 +4,7 @@ import type { MarkView, PointPx } from '#shared/contracts/marks.ts';
 import { useWidth } from '#src/ui/use-width.ts';
 import { DrawnMark } from './drawn-mark.tsx';
 import { DrawnScaleBar } from './drawn-scale-bar.tsx';
-import { regionOf } from './seen-region.ts';
+import { regionOf, type SeenRegion } from './seen-region.ts';
 
 type FigureWithMarksProps = {
   caseNumber: string;
@@ -22,17 +22,21 @@ const widestCropPx = 1600;
 export function FigureWithMarks({ caseNumber, fractograph, marks }: FigureWithMarksProps) {
   const frame = useRef<HTMLDivElement>(null);
   const width = useWidth(frame, usualWidthPx);
-  const height = Math.round(width * heightOverWidth);
   const { widthPx, heightPx, id, scale, figureNumber } = fractograph;
   if (widthPx === null || heightPx === null) {
     return (
-      <div ref={frame} className="grid place-items-center bg-plate p-8 text-on-plate-2" style={{ minHeight: height }}>
+      <div
+        ref={frame}
+        className="grid place-items-center bg-plate p-8 text-on-plate-2"
+        style={{ minHeight: width * heightOverWidth }}
+      >
         Fig. {figureNumber} is not read yet.
       </div>
     );
   }
   const region = regionOf({ widthPx, heightPx }, marks, heightOverWidth);
   const screenPerPx = width / region.acrossPx;
+  const height = Math.round(region.downPx * screenPerPx);
   const toScreen = ({ x, y }: PointPx): PointPx => ({
     x: width / 2 + (x - region.centre.x) * screenPerPx,
     y: height / 2 + (y - region.centre.y) * screenPerPx,
@@ -54,14 +58,14 @@ export function FigureWithMarks({ caseNumber, fractograph, marks }: FigureWithMa
   );
 }
 
-function cropAddress(caseNumber: string, id: string, region: { centre: PointPx; acrossPx: number }): string {
+function cropAddress(caseNumber: string, id: string, region: SeenRegion): string {
   const width = Math.min(widestCropPx, usualWidthPx * sharpness);
   const asked = {
     x: Math.round(region.centre.x),
     y: Math.round(region.centre.y),
     across: Math.round(region.acrossPx),
     width,
-    height: Math.round(width * heightOverWidth),
+    height: Math.round((width * region.downPx) / region.acrossPx),
   };
   const query = new URLSearchParams(Object.entries(asked).map(([name, value]) => [name, String(value)]));
   return `/api/cases/${caseNumber}/fractographs/${id}/crop?${query.toString()}`;

@@ -1,8 +1,8 @@
 import type { MarkView, PointPx } from '#shared/contracts/marks.ts';
 import { outlineOf } from '../bench/kinds/shapes/shape-acts.ts';
 
-/** The part of an image that is shown, image px: its middle and its width; the height follows from the frame. */
-export type SeenRegion = { readonly centre: PointPx; readonly acrossPx: number };
+/** The part of an image that is shown, image px: its middle, its width and its height, all of it on the image. */
+export type SeenRegion = { readonly centre: PointPx; readonly acrossPx: number; readonly downPx: number };
 
 // Marks keep this share of the frame's edge free on every side.
 const marginShare = 0.16;
@@ -10,27 +10,34 @@ const marginShare = 0.16;
 const leastAcrossPx = 240;
 
 /**
- * The part of the image that holds its marks, in the shape of the frame (height over width), else the whole image: as
- * near as the marks allow and never past what the image has.
+ * The part of the image that holds its marks, in the shape of the frame (height over width) as far as the image has it,
+ * else the whole image: as near as the marks allow and never past what the image has.
  */
 export function regionOf(
   image: { widthPx: number; heightPx: number },
   marks: readonly MarkView[],
   heightOverWidth: number,
 ): SeenRegion {
-  const wholeAcross = Math.max(image.widthPx, image.heightPx / heightOverWidth);
   const points = marks.flatMap((mark) => [...outlineOf(mark.geometry)]);
-  if (points.length === 0) return { centre: { x: image.widthPx / 2, y: image.heightPx / 2 }, acrossPx: wholeAcross };
+  if (points.length === 0)
+    return {
+      centre: { x: image.widthPx / 2, y: image.heightPx / 2 },
+      acrossPx: image.widthPx,
+      downPx: image.heightPx,
+    };
   const [left, right] = [Math.min(...points.map(({ x }) => x)), Math.max(...points.map(({ x }) => x))];
   const [top, bottom] = [Math.min(...points.map(({ y }) => y)), Math.max(...points.map(({ y }) => y))];
-  const wanted = Math.max(right - left, (bottom - top) / heightOverWidth) / (1 - 2 * marginShare);
-  const acrossPx = Math.min(wholeAcross, Math.max(leastAcrossPx, wanted));
+  const free = 1 - 2 * marginShare;
+  const wanted = Math.max(leastAcrossPx, (right - left) / free, (bottom - top) / free / heightOverWidth);
+  const acrossPx = Math.min(image.widthPx, wanted);
+  const downPx = Math.min(image.heightPx, Math.max(acrossPx * heightOverWidth, (bottom - top) / free));
   return {
     centre: {
       x: kept((left + right) / 2, acrossPx / 2, image.widthPx),
-      y: kept((top + bottom) / 2, (acrossPx * heightOverWidth) / 2, image.heightPx),
+      y: kept((top + bottom) / 2, downPx / 2, image.heightPx),
     },
     acrossPx,
+    downPx,
   };
 }
 

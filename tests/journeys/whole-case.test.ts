@@ -9,7 +9,7 @@ import { drawFractureSurface } from '#server/imaging/synthetic-surface/draw-frac
 import { encodeFractureSurface } from '#server/imaging/synthetic-surface/encode-fracture-surface.ts';
 import type { SurfaceTruth } from '#server/imaging/synthetic-surface/surface-spec.ts';
 import type { EstimateView } from '#shared/contracts/estimates.ts';
-import { openBrowser, visitorPage, type SignedInPage } from '../support/browser.ts';
+import { openBrowser, pageOf, visitorPage, type SignedInPage } from '../support/browser.ts';
 import { OpenBench } from '../support/on-the-bench.ts';
 import { builtPages } from '../support/pages.ts';
 import { aLaboratory, startTestServer, testPassword, type TestServer } from '../support/test-server.ts';
@@ -27,6 +27,8 @@ let folder: string;
 let picture: string;
 let truth: SurfaceTruth;
 let ana: SignedInPage;
+let writer: SignedInPage | undefined;
+let manager: SignedInPage | undefined;
 let number = '';
 
 beforeAll(async () => {
@@ -123,6 +125,12 @@ async function takeConstant(page: Page, label: string): Promise<void> {
   await group.getByLabel('Constant on record').selectOption({ index: 1 });
 }
 
+/** Sets the caret at the end of the paragraph under a heading of the findings. */
+async function under(page: Page, heading: string): Promise<void> {
+  await page.locator('.findings-prose h2', { hasText: heading }).locator('xpath=following-sibling::p[1]').click();
+  await page.keyboard.press('End');
+}
+
 async function estimatesKept(): Promise<EstimateView[]> {
   const { body } = await people.analyst.client.get(`/cases/${number}/estimates`);
   return body.estimates;
@@ -156,6 +164,7 @@ describe('one broken bar, from its arrival to its seal', () => {
     await page.getByRole('button', { name: 'Enter the part' }).click();
     await page.getByLabel('What it is').fill('Bend bar A-17, 3 × 4 × 45 mm');
     await page.getByRole('button', { name: 'Enter the part' }).click();
+    await look(page, '04-part');
     await page.getByRole('button', { name: 'Receive a piece' }).click();
     await page.getByLabel('What it is').fill('left half, face A');
     await page.getByLabel('Mass').fill('1.02 g ± 0.01 g');
@@ -255,6 +264,93 @@ describe('one broken bar, from its arrival to its seal', () => {
     // σ = A/√R with R = 560 µm, and K/(Y√a) with a = 64 µm; the marks are set by hand to a px or two of screen
     expect(Math.abs(mirror / (8.5 / Math.sqrt(560e-6)) - 1)).toBeLessThan(0.015);
     expect(Math.abs(flaw / (3.5 / (1.29 * Math.sqrt(64e-6))) - 1)).toBeLessThan(0.04);
+  });
+
+  it('is written up by two people at once, with a figure and the number bound into the text', async () => {
+    const { page } = ana;
+    await move(page, /draft/i);
+    await page.locator('header, main').getByText('drafting').first().waitFor();
+    writer = await pageOf(browser, server.address, people.engineer);
+    for (const each of [page, writer.page]) {
+      await each.goto(`/cases/${number}/findings`);
+      await each.locator('.findings-prose h2').first().waitFor();
+    }
+    await under(page, 'What the surface shows');
+    await under(writer.page, 'What to do');
+    await Promise.all([
+      page.keyboard.type('The break started at a pore cut by the tensile surface. ', { delay: 4 }),
+      writer.page.keyboard.type('Nothing; the bar is an ordinary member of its lot. ', { delay: 4 }),
+    ]);
+    await page.getByText('ordinary member of its lot').waitFor();
+    await page.getByRole('button', { name: 'Figure' }).click();
+    await page.getByLabel('What is seen').fill('Origin, flaw and mirror on the left half.');
+    await page.getByRole('button', { name: 'Place Fig. 1' }).click();
+    await page.locator('.findings-figure img').waitFor();
+    await under(page, 'Stress at the origin');
+    await page.keyboard.type('By load and section the origin carried ');
+    await page.keyboard.press('Control+k');
+    await page.getByRole('combobox', { name: 'Find a value' }).fill('load origin');
+    await page.locator('.bind-preview .bound-value').waitFor();
+    await page.keyboard.press('Enter');
+    await page.locator('.findings-prose .bound-value').getByText('350').waitFor();
+    await Promise.all([page, writer.page].map((each) => each.getByText(/^Kept \d\d:\d\d/).waitFor()));
+    await look(page, '09-findings');
+  });
+
+  it('goes to review once nothing stands in its way, signed by its author', async () => {
+    const { page } = ana;
+    await chapter(page, 'Review');
+    await page.getByRole('button', { name: `Send ${number} to review` }).waitFor();
+    await look(page, '10-toward-review');
+    await page.getByRole('button', { name: `Send ${number} to review` }).click();
+    await page.getByLabel('Your signature says').selectOption('authored');
+    await page.getByLabel('Your password, once more').fill(testPassword);
+    await page.getByRole('button', { name: 'Sign as authored' }).click();
+    await page.getByRole('rowheader', { name: /^Authored/ }).waitFor();
+    await look(page, '11-in-review');
+  });
+
+  it('is read by a manager, who accepts its notes with reasons, signs and closes it', async () => {
+    manager = await visitorPage(browser, server.address);
+    const { page } = manager;
+    await signIn(page, people.manager.mail);
+    await page.getByRole('link', { name: number }).click();
+    await chapter(page, 'Findings');
+    await page.getByText('The break started at a pore').waitFor();
+    await page.locator('.findings-prose .bound-value').getByText('350').waitFor();
+    await chapter(page, 'Review');
+    const accept = page.getByRole('button', { name: 'Accept this note' });
+    await accept.first().waitFor();
+    await look(page, '12-notes');
+    const reason = page.getByLabel('Why it may stand');
+    while ((await accept.count()) > 0) {
+      await accept.first().click();
+      await reason.fill('Seen, and no hindrance to the answer.');
+      await page.getByRole('button', { name: 'Let the note stand' }).click();
+      await reason.waitFor({ state: 'detached' });
+    }
+    await page.getByLabel('Your signature says').selectOption('approved');
+    await page.getByLabel('Your password, once more').fill(testPassword);
+    await look(page, '12-before-signing');
+    await page.getByRole('button', { name: `Sign and close ${number}` }).click();
+    await page.getByText('Every image and record still matches the list').waitFor();
+    await look(page, '13-closed');
+  });
+
+  it('is frozen from then on', async () => {
+    const { page } = ana;
+    await page.goto(`/cases/${number}/estimates`);
+    await page.getByText(/Closed on .* sealed/).waitFor();
+    expect(await page.getByRole('button', { name: /^Estimate by/ }).count()).toBe(0);
+    const answer = await people.analyst.client.post(`/cases/${number}/background`, {
+      ...{ statement: 'One more thing', standing: 'told', source: 'someone', givenOn: '2026-12-01' },
+    });
+    expect(answer.body.code).toBe('closed-case');
+    await look(page, '14-sealed');
+  });
+
+  it('leaves no error in the console of anyone', () => {
+    expect([ana, writer, manager].flatMap((each) => each?.complaints ?? ['was never there'])).toEqual([]);
   });
 });
 

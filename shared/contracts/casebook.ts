@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { caseStates, urgencies } from '../vocabulary/case-states.ts';
+import { lineageKinds } from '../vocabulary/lineage-kinds.ts';
 import { originCodes } from '../vocabulary/origin-codes.ts';
 import { plainStates } from './cases.ts';
 import { Named } from './fractographs.ts';
@@ -48,7 +49,7 @@ const StaffRow = z.object({
   originCode: z.enum(originCodes).nullable(),
   /** The newest origin mark on a figure that is ready, and how much to show about it, image px; absent without one. */
   picture: z.object({ fractographId: z.uuid(), x: z.number(), y: z.number(), acrossPx: z.number().int() }).nullable(),
-  stale: z.object({ why: z.string(), since: z.iso.datetime() }).nullable(),
+  stale: z.object({ cause: z.enum(lineageKinds), why: z.string(), since: z.iso.datetime() }).nullable(),
 });
 const FollowedRow = z.object({
   seenAs: z.literal('requester'),

@@ -1,7 +1,9 @@
 import { PlusIcon } from '@phosphor-icons/react/dist/csr/Plus';
 import { useQuery } from '@tanstack/react-query';
+import type { ComponentProps } from 'react';
 import { Link, useSearchParams } from 'react-router-dom';
 import type { CasebookCounts, CasebookPage, CasebookQuery } from '#shared/contracts/casebook.ts';
+import type { Verdict } from '#shared/vocabulary/estimate-lines.ts';
 import { mayInLaboratory } from '#shared/rules/may.ts';
 import { caseChoices, casebookCounts, casebookOf } from '#src/features/cases/api.ts';
 import { readAddress, writeAddress } from '#src/features/cases/casebook-address.ts';
@@ -12,6 +14,8 @@ import { FilterSentence } from '#src/features/cases/components/filter-sentence.t
 import { NumbersTable } from '#src/features/cases/components/numbers-table.tsx';
 import { RequestsTable } from '#src/features/cases/components/requests-table.tsx';
 import { WordsSearch } from '#src/features/cases/components/words-search.tsx';
+import { verdictsOf } from '#src/features/estimates/api.ts';
+import { VerdictWord } from '#src/features/estimates/components/verdict-word.tsx';
 import { leadSentence, reviewSentence, staleSentence } from '#src/features/cases/lead-sentence.ts';
 import { usePerson } from '#src/http/session.ts';
 import { Button } from '#src/ui/button.tsx';
@@ -53,7 +57,7 @@ export function Component() {
       <div className="flex flex-wrap items-baseline justify-between gap-x-6 gap-y-2 py-2">
         {readsWork ? <FilterSentence {...{ query, thisYear }} choices={choices.data} onChange={change} /> : null}
         <WordsSearch
-          within={readsWork ? 'Number, part or what happened' : 'Number or what was sent'}
+          within={readsWork ? 'Number, part or what happened' : isLaboratory ? 'Number' : 'Number or what was sent'}
           words={query.words}
           focused={search.has('find')}
           onWords={(words) => change({ words })}
@@ -92,6 +96,15 @@ function Lead({ counts, detailed }: { counts: CasebookCounts; detailed: boolean 
   );
 }
 
+/** The laboratory's rows, with the verdicts over their lines of evidence as soon as these are read. */
+function StaffCases(props: Omit<ComponentProps<typeof CasebookTable>, 'linesOf'>) {
+  const { data } = useQuery(verdictsOf(props.rows.map((row) => row.number)));
+  const verdicts = new Map<string, Verdict>(data?.map(({ number, verdict }) => [number, verdict]));
+  return (
+    <CasebookTable {...props} linesOf={(number) => (data ? <VerdictWord verdict={verdicts.get(number)} /> : null)} />
+  );
+}
+
 type CasesProps = {
   page: CasebookPage;
   query: CasebookQuery;
@@ -118,6 +131,6 @@ function Cases({ page, query, personId, all, onChange }: CasesProps) {
     const first = order === 'number' || order === 'age' ? 'descending' : 'ascending';
     onChange({ order, direction: query.order === order ? turned : first });
   };
-  if (staff.length > 0) return <CasebookTable {...{ asOf, query, personId, onOrder }} rows={staff} />;
+  if (staff.length > 0) return <StaffCases {...{ asOf, query, personId, onOrder }} rows={staff} />;
   return followed.length > 0 ? <RequestsTable rows={followed} /> : <NumbersTable rows={numbers} />;
 }

@@ -85,7 +85,9 @@ export function presentCasebookRow(row: CasebookRowRead, seenAs: CasebookRow['se
         ? { fractographId, x, y, acrossPx }
         : null,
     stale:
-      row.stale_why !== null && row.stale_since !== null ? { why: row.stale_why, since: iso(row.stale_since) } : null,
+      row.stale_cause !== null && row.stale_why !== null && row.stale_since !== null
+        ? { cause: row.stale_cause, why: row.stale_why, since: iso(row.stale_since) }
+        : null,
   };
 }
 

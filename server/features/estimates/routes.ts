@@ -5,15 +5,24 @@ import {
   OldValueKept,
   StandingChanged,
 } from '#shared/contracts/estimates.ts';
+import { VerdictsAsked } from '#shared/contracts/casebook-verdicts.ts';
 import { CasePath } from '#shared/contracts/ids.ts';
 import { route } from '../../http/route.ts';
 import { listEstimates, loadEstimateView } from './service/list-estimates.ts';
+import { listVerdicts } from './service/list-verdicts.ts';
 import { makeEstimate } from './service/make-estimate.ts';
 import { recomputeEstimate } from './service/recompute-estimate.ts';
 import { renewEstimate } from './service/renew-estimate.ts';
 import { changeStanding, keepOldValue } from './service/settle-estimate.ts';
 
 export const estimateRoutes = [
+  route({
+    method: 'get',
+    path: '/casebook/verdicts',
+    rule: { who: 'may', act: 'see the casebook' },
+    query: VerdictsAsked,
+    handle: ({ context, query }) => listVerdicts(context, query.numbers),
+  }),
   route({
     method: 'get',
     path: '/cases/:number/estimates',

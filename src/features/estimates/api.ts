@@ -1,4 +1,5 @@
 import { queryOptions, useMutation } from '@tanstack/react-query';
+import { CasebookVerdicts } from '#shared/contracts/casebook-verdicts.ts';
 import { EstimatesView, EstimateView, type EstimateWantedInput } from '#shared/contracts/estimates.ts';
 import { MeasurementList } from '#shared/contracts/marks.ts';
 import { MaterialList, MaterialWithConstants } from '#shared/contracts/materials.ts';
@@ -10,6 +11,14 @@ export const estimatesOf = (number: string) =>
   queryOptions({
     queryKey: ['case', number, 'estimates'],
     queryFn: ({ signal }) => read(`/cases/${number}/estimates`, EstimatesView, signal),
+  });
+
+/** The verdicts over the lines of evidence of the cases of a page, by their numbers. */
+export const verdictsOf = (numbers: readonly string[]) =>
+  queryOptions({
+    queryKey: ['casebook', 'verdicts', ...numbers],
+    enabled: numbers.length > 0,
+    queryFn: ({ signal }) => read(`/casebook/verdicts?numbers=${numbers.join(',')}`, CasebookVerdicts, signal),
   });
 
 /** The lengths of a case that marks say now. */

@@ -1,5 +1,6 @@
 import { sql, type SQL } from 'drizzle-orm';
 import type { CasebookOrder, CasebookQuery, StaffRow } from '#shared/contracts/casebook.ts';
+import type { LineageKind } from '#shared/vocabulary/lineage-kinds.ts';
 import type { Person } from '#shared/contracts/people.ts';
 import type { Reader } from '../../../database/connection.ts';
 import { filterOf } from './casebook-filter.ts';
@@ -23,6 +24,7 @@ export type CasebookRowRead = {
   picture_x: number | null;
   picture_y: number | null;
   picture_across: number | null;
+  stale_cause: LineageKind | null;
   stale_why: string | null;
   stale_since: string | null;
 };
@@ -50,7 +52,7 @@ export function casebookPage({ person, query, thisYear }: Asked): SQL {
       m.name as material, c.assigned_to, h.name as assigned_name,
       exists (select 1 from fractographs f where f.case_id = c.id) as has_fractographs,
       o.origin_code, o.picture_fractograph_id, o.picture_x, o.picture_y, o.picture_across,
-      s.why as stale_why, s.since as stale_since
+      s.cause_kind as stale_cause, s.why as stale_why, s.since as stale_since
     from page join cases c on c.id = page.id
     left join materials m on m.id = c.material_id
     left join people h on h.id = c.assigned_to
@@ -66,7 +68,7 @@ export function casebookPage({ person, query, thisYear }: Asked): SQL {
       where k.case_id = c.id and k.kind = 'origin' and not v.removed
       order by v.made_at desc, v.id desc limit 1) o on true
     left join lateral (
-      select t.why, t.since from staleness t where t.case_id = c.id and t.settled_at is null
+      select t.cause_kind, t.why, t.since from staleness t where t.case_id = c.id and t.settled_at is null
       order by t.since desc limit 1) s on true
     order by page.place`;
 }

@@ -1,4 +1,4 @@
-import { and, asc, eq, sql } from 'drizzle-orm';
+import { and, asc, eq, inArray, sql } from 'drizzle-orm';
 import { alias } from 'drizzle-orm/pg-core';
 import type { CaseAct } from '#shared/rules/may.ts';
 import type { Reader, Transaction } from '../../../database/connection.ts';
@@ -18,6 +18,13 @@ export type EstimateRow = Awaited<ReturnType<typeof listEstimateRows>>[number];
 /** Every estimate of the case in the order of their numbers, with what superseded it and where it stands. */
 export function listEstimateRows(reader: Reader, heldCase: HeldCase) {
   return selectEstimates(reader).where(eq(estimates.caseId, heldCase.id)).orderBy(asc(estimates.number));
+}
+
+/** The same of several cases at once. */
+export async function listEstimateRowsOf(reader: Reader, heldCases: readonly HeldCase[]) {
+  if (heldCases.length === 0) return [];
+  const ids = heldCases.map(({ id }) => id);
+  return selectEstimates(reader).where(inArray(estimates.caseId, ids)).orderBy(asc(estimates.number));
 }
 
 export async function findEstimateRow(reader: Reader, heldCase: HeldCase, id: string) {

@@ -1,5 +1,7 @@
+import type { ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 import type { StaffRow } from '#shared/contracts/casebook.ts';
+import type { LineageKind } from '#shared/vocabulary/lineage-kinds.ts';
 import { daysBetween, formatAge, formatShortDay } from '#shared/wording/dates.ts';
 import { ExposedGlyph } from '#src/ui/glyphs/exposed-glyph.tsx';
 import { GlyphWord } from '#src/ui/glyph-word.tsx';
@@ -14,12 +16,28 @@ type CasebookRowProps = {
   /** The longest age on the page, days: the length of the whole age bar. */
   oldestDays: number;
   personId: string;
+  /** What its lines of evidence say. */
+  lines: ReactNode;
 };
 
 const ageBarWidthPx = 34;
 
+/** What it was that changed, short enough for the margin; the whole of it stands in its title and in the case. */
+const changedWords: Record<LineageKind, string> = {
+  fractograph: 'image replaced',
+  calibration: 'scale replaced',
+  'calibration binding': 'scale changed',
+  'mark version': 'mark moved',
+  measurement: 'length read anew',
+  'material constant': 'constant revised',
+  estimate: 'estimate remade',
+  comparison: 'comparison remade',
+  'bound value': 'value taken anew',
+  figure: 'figure drawn anew',
+};
+
 /** A case in the Casebook, for the laboratory. */
-export function CasebookTableRow({ row, asOf, oldestDays, personId }: CasebookRowProps) {
+export function CasebookTableRow({ row, asOf, oldestDays, personId, lines }: CasebookRowProps) {
   const days = daysBetween(row.receivedAt, row.closedAt ?? asOf);
   const gone = row.state === 'withdrawn';
   const year = new Date(asOf).getUTCFullYear();
@@ -33,7 +51,7 @@ export function CasebookTableRow({ row, asOf, oldestDays, personId }: CasebookRo
       </td>
       <td className={joinClasses('is-wide', gone ? 'text-ink-3' : 'font-semibold')}>
         {row.title}
-        {row.urgency === 'exposed now' ? (
+        {row.urgency === 'exposed now' && !row.closedAt && !gone ? (
           <span className="block text-s text-iron">
             <GlyphWord glyph={<ExposedGlyph />}>exposed now</GlyphWord>
           </span>
@@ -59,19 +77,32 @@ export function CasebookTableRow({ row, asOf, oldestDays, personId }: CasebookRo
         {row.assignedTo?.name ?? <span className="font-normal text-ink-3">no one yet</span>}
       </td>
       <td className="is-wide whitespace-nowrap">
-        {row.originCode ? <OriginWord code={row.originCode} /> : <span className="text-ink-3">not looked for</span>}
+        {row.originCode ? (
+          <OriginWord code={row.originCode} />
+        ) : (
+          <span className="text-ink-3">{noOriginWords(row)}</span>
+        )}
+      </td>
+      <td className="is-wide whitespace-nowrap" data-word="lines">
+        {lines}
       </td>
       <td className="is-remark is-wide">
         {row.stale ? (
           <StaleRemark>
-            <span className="line-clamp-1" title={row.stale.why}>
-              {row.stale.why}, {formatShortDay(row.stale.since, year)}
+            <span title={row.stale.why}>
+              {changedWords[row.stale.cause]} {formatShortDay(row.stale.since, year)}
             </span>
           </StaleRemark>
         ) : null}
       </td>
     </tr>
   );
+}
+
+/** Where no origin is marked: whether one was looked for. */
+function noOriginWords({ hasFractographs, closedAt }: StaffRow): string {
+  if (!hasFractographs) return 'not looked for';
+  return closedAt ? 'not found' : 'not found yet';
 }
 
 /** The crop at the origin; where there is none, the place says so in words. */

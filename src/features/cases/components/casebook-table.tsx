@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import type { CasebookOrder, CasebookQuery, StaffRow } from '#shared/contracts/casebook.ts';
 import { daysBetween } from '#shared/wording/dates.ts';
 import { Table } from '#src/ui/table.tsx';
@@ -9,11 +10,13 @@ type CasebookTableProps = {
   asOf: string;
   query: CasebookQuery;
   personId: string;
+  /** What stands under "Lines of evidence"; the rows know nothing of estimates. */
+  linesOf: (number: string) => ReactNode;
   onOrder: (order: CasebookOrder) => void;
 };
 
 /** The cases of the laboratory: origin, number, what broke, and how it stands. */
-export function CasebookTable({ rows, asOf, query, personId, onOrder }: CasebookTableProps) {
+export function CasebookTable({ rows, asOf, query, personId, linesOf, onOrder }: CasebookTableProps) {
   const oldestDays = Math.max(0, ...rows.map((row) => daysBetween(row.receivedAt, row.closedAt ?? asOf)));
   const head = (order: CasebookOrder) => ({
     sorted: query.order === order ? query.direction : ('none' as const),
@@ -33,12 +36,13 @@ export function CasebookTable({ rows, asOf, query, personId, onOrder }: Casebook
           <Th {...head('age')}>Age</Th>
           <Th>With</Th>
           <Th>Origin</Th>
+          <Th>Lines of evidence</Th>
           <Th hidden>Margin: what is stale</Th>
         </tr>
       </thead>
       <tbody>
         {rows.map((row) => (
-          <CasebookTableRow key={row.number} {...{ row, asOf, oldestDays, personId }} />
+          <CasebookTableRow key={row.number} {...{ row, asOf, oldestDays, personId }} lines={linesOf(row.number)} />
         ))}
       </tbody>
     </Table>

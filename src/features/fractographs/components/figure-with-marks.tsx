@@ -17,6 +17,8 @@ const usualWidthPx = 560;
 const heightOverWidth = 452 / 584;
 const sharpness = 2;
 const widestCropPx = 1600;
+// The bar stands on a strip of its own, so that it never lies across one burned into the image.
+const footPx = 28;
 
 /** A fractograph with its marks drawn in: near enough to see them all, strokes and labels of one size whatever the image. */
 export function FigureWithMarks({ caseNumber, fractograph, marks }: FigureWithMarksProps) {
@@ -42,17 +44,24 @@ export function FigureWithMarks({ caseNumber, fractograph, marks }: FigureWithMa
     y: height / 2 + (y - region.centre.y) * screenPerPx,
   });
   return (
-    <div ref={frame} className="on-image relative overflow-hidden bg-plate" style={{ height }}>
+    <div ref={frame} className="on-image relative overflow-hidden bg-plate" style={{ height: height + footPx }}>
       <img
         src={cropAddress(caseNumber, id, region)}
         alt={altOf(fractograph, marks)}
-        className="absolute inset-0 h-full w-full"
+        className="absolute inset-x-0 top-0 w-full"
+        style={{ height }}
       />
-      <svg width={width} height={height} viewBox={`0 0 ${width} ${height}`} className="absolute inset-0" aria-hidden>
+      <svg
+        width={width}
+        height={height + footPx}
+        viewBox={`0 0 ${width} ${height + footPx}`}
+        className="absolute inset-0"
+        aria-hidden
+      >
         {marks.map((mark) => (
           <DrawnMark key={mark.id} mark={mark} toScreen={toScreen} isCrowded={marks.length > 8} />
         ))}
-        <DrawnScaleBar pxPerScreen={region.acrossPx / width} scale={scale} x={20} y={height - 18} />
+        <DrawnScaleBar pxPerScreen={region.acrossPx / width} scale={scale} x={14} y={height + footPx / 2} />
       </svg>
     </div>
   );

@@ -21,7 +21,7 @@ export function Component() {
   });
   return (
     <Frontispiece>
-      <h1 className="mb-4 text-h3">A new password</h1>
+      <h2 className="mb-4 text-h3">A new password</h2>
       {isSubmitSuccessful ? (
         <Note tone="celadon" lead="Look into your mailbox." className="mb-5">
           If an open account has this address, a link is on its way. It holds one hour and works once.

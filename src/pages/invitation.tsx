@@ -14,7 +14,7 @@ export function Component() {
       <OneTimeLink purpose="invitations" token={token} wayOn="Ask the laboratory to send the invitation again.">
         {(link) => (
           <>
-            <h1 className="mb-2 text-h3">You are invited, {link.name}</h1>
+            <h2 className="mb-2 text-h3">You are invited, {link.name}</h2>
             <p className="mb-5 text-ink-2">
               {link.organisationName}, as <b className="text-ink">{link.mail}</b>. Choose a password and the account is
               yours.

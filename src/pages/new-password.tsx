@@ -22,7 +22,7 @@ export function Component() {
       >
         {(link) => (
           <>
-            <h1 className="mb-2 text-h3">A new password</h1>
+            <h2 className="mb-2 text-h3">A new password</h2>
             <p className="mb-5 text-ink-2">
               For <b className="text-ink">{link.mail}</b>. You will be signed out on every machine.
             </p>

@@ -4,7 +4,7 @@ import { CornerTicks } from './corner-ticks.tsx';
 type EmptyStateProps = {
   /** A drawn hint of what belongs here. */
   hint?: ReactNode;
-  /** A heading, where the page has none. */
+  /** The page's first heading, where it has none. */
   title?: ReactNode;
   /** One sentence that says what to do next. */
   children: ReactNode;
@@ -18,7 +18,7 @@ export function EmptyState({ hint, title, children, acts, help }: EmptyStateProp
   return (
     <div className="flex flex-col items-center px-5 pt-[22px] pb-4 text-center narrow:px-0">
       <CornerTicks>{hint ?? <EmptyLine />}</CornerTicks>
-      {title ? <h4 className="mt-3">{title}</h4> : null}
+      {title ? <h1 className="mt-3 text-h4">{title}</h1> : null}
       <p className={title ? 'mt-1 max-w-[34em]' : 'mt-4 max-w-[26em] font-serif text-[19px]/[1.4]'}>{children}</p>
       {acts ? <div className="acts mt-[14px] justify-center">{acts}</div> : null}
       {help ? <p className="mt-3 text-s text-ink-2">{help}</p> : null}

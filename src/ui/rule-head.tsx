@@ -11,7 +11,7 @@ type RuleHeadProps = {
 };
 
 /** A heading over a rule. */
-export function RuleHead({ children, aside, level = 3, small = false, id }: RuleHeadProps) {
+export function RuleHead({ children, aside, small = false, level = small ? 3 : 2, id }: RuleHeadProps) {
   const Heading = `h${level}` as const;
   return (
     <div className="rule-head">

@@ -57,7 +57,7 @@ const samples: Record<MarkShape, ReactNode> = {
   note: (
     <>
       <circle cx="11" cy="8" r="6" stroke="#fff" strokeWidth="1.4" />
-      <text x="11" y="12" fontSize="10.5" fontWeight="600" textAnchor="middle" fill="#fff">
+      <text x="11" y="12.4" fontSize="12" fontWeight="600" textAnchor="middle" fill="#fff">
         n
       </text>
     </>

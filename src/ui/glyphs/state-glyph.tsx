@@ -4,7 +4,7 @@ export type StateShape = 'received' | 'examining' | 'drafting' | 'in review' | '
 
 type StateGlyphProps = {
   state: StateShape;
-  /** How far the case had come before it was held or withdrawn; received where it isn't given. */
+  /** How far the case had come before it was held or withdrawn; no stroke is heavy where it isn't known. */
   cameTo?: 'received' | 'examining' | 'drafting' | 'in review';
   /** A closed case with an amendment in progress. */
   amending?: boolean;
@@ -28,8 +28,9 @@ const heavy: Record<'received' | 'examining' | 'drafting' | 'in review' | 'close
 };
 
 /** A fan of five strokes, as many heavy as the case has come. An arc closes it; a bar holds it; a stroke withdraws it. */
-export function StateGlyph({ state, cameTo = 'received', amending = false, size = 24 }: StateGlyphProps) {
-  const count = state === 'on hold' || state === 'withdrawn' ? heavy[cameTo] : heavy[state];
+export function StateGlyph({ state, cameTo, amending = false, size = 24 }: StateGlyphProps) {
+  const reached = state === 'on hold' || state === 'withdrawn' ? cameTo : state;
+  const count = reached ? heavy[reached] : 0;
   return (
     <Glyph width={size} height={(size * 17) / 24} viewBox="0 0 24 17">
       {strokes.map((d, index) => (

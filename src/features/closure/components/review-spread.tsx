@@ -33,9 +33,7 @@ function TowardReview({ review, acts }: ReviewSpreadProps) {
         <SendToReview review={review} acts={acts} />
         {review.signatures.length === 0 ? null : (
           <section aria-label="Signatures" className="mt-5">
-            <RuleHead small level={4}>
-              Signatures of earlier rounds
-            </RuleHead>
+            <RuleHead small>Signatures of earlier rounds</RuleHead>
             <SignaturesTable review={review} />
           </section>
         )}
@@ -76,9 +74,7 @@ function Closed({ review, closure }: ReviewSpreadProps & { closure: NonNullable<
       </Page>
       <Page label="Seal and signatures" folio={{ chapter: 'vii', words: 'Seal and signatures', side: 'right' }}>
         <SealHead closure={closure} />
-        <RuleHead small level={4}>
-          Signatures
-        </RuleHead>
+        <RuleHead small>Signatures</RuleHead>
         <SignaturesTable review={review} />
         <p className="mt-4">
           <b>

@@ -7,7 +7,7 @@ export function RoundsList({ review: { rounds, zone } }: { review: ReviewView })
   if (rounds.length === 0) return null;
   return (
     <section aria-label="Rounds of review" className="mt-5">
-      <RuleHead small level={4} aside={rounds.length === 1 ? 'one round' : `${rounds.length} rounds`}>
+      <RuleHead small aside={rounds.length === 1 ? 'one round' : `${rounds.length} rounds`}>
         Rounds of review
       </RuleHead>
       <ol>

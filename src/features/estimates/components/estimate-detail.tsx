@@ -31,15 +31,11 @@ export function EstimateDetail({ estimate, caseNumber, mayEstimate, onMakeAgain 
       {bar ? <BarDrawing bar={bar} /> : null}
       <div className="mt-4 grid gap-x-8 gap-y-5 min-[1240px]:grid-cols-[minmax(0,7fr)_minmax(0,5fr)]">
         <div className="min-w-0">
-          <RuleHead small level={4}>
-            What the ± is made of
-          </RuleHead>
+          <RuleHead small>What the ± is made of</RuleHead>
           <MadeOf budget={estimate.budget} />
         </div>
         <div className="min-w-0">
-          <RuleHead small level={4}>
-            Remarks
-          </RuleHead>
+          <RuleHead small>Remarks</RuleHead>
           <Remarks estimate={estimate} />
         </div>
       </div>

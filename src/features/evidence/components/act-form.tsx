@@ -21,7 +21,7 @@ type ActFormProps = {
 export function ActForm({ title, aside, act, error, isSending, onSubmit, onLeave, children }: ActFormProps) {
   return (
     <form noValidate onSubmit={onSubmit} className="mt-5 first:mt-0">
-      <RuleHead small level={4} aside={aside}>
+      <RuleHead small aside={aside}>
         {title}
       </RuleHead>
       <div className="mt-3 flex flex-col gap-4">

@@ -47,9 +47,7 @@ export function DescribeForm({ number, figure, onDone }: DescribeFormProps) {
   const said = (name: keyof DescribeFields) => formState.errors[name]?.message;
   return (
     <form noValidate className="mt-6" onSubmit={(event) => void form.handleSubmit((typed) => keep(typed))(event)}>
-      <RuleHead small level={4}>
-        Describe Fig. {figure.figureNumber}
-      </RuleHead>
+      <RuleHead small>Describe Fig. {figure.figureNumber}</RuleHead>
       <div className="mt-3 grid grid-cols-2 items-start gap-4 narrow:grid-cols-1">
         <TextArea label="Caption" rows={2} className="col-span-full" {...register('caption')} error={said('caption')} />
         <SelectField label="Piece" {...register('fragmentId')} error={said('fragmentId')}>

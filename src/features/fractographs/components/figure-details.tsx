@@ -115,7 +115,7 @@ function Facts({ number, figure }: { number: string; figure: FractographView }) 
   const missing = missingFacts(figure);
   return (
     <div className="mt-6">
-      <RuleHead small level={4} aside={figure.standing === 'record' ? 'a record' : 'a working image'}>
+      <RuleHead small aside={figure.standing === 'record' ? 'a record' : 'a working image'}>
         What is known of it
       </RuleHead>
       <dl className="mt-2 grid grid-cols-[auto_1fr] gap-x-5 gap-y-1">

@@ -35,7 +35,7 @@ export function FigureStrip({ caseNumber, fractographs, shownId, addressOf }: Fi
             </span>
           )}
           <span className="mt-1 block">
-            <b className="font-serif font-medium italic text-ink">Fig. {each.figureNumber}</b>{' '}
+            <b className="mr-1 font-serif font-medium italic text-ink">Fig. {each.figureNumber}</b>
             {each.view ?? each.caption}
           </span>
         </Link>

@@ -69,7 +69,7 @@ export function ScaleForm(props: ScaleFormProps) {
         bind();
       }}
     >
-      <RuleHead small level={4} aside={image.scale ? 'all that was read with the old one turns stale' : null}>
+      <RuleHead small aside={image.scale ? 'all that was read with the old one turns stale' : null}>
         The scale of Fig. {image.figureNumber}
       </RuleHead>
       <fieldset className="mt-3 flex flex-col gap-1">

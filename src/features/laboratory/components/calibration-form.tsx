@@ -47,9 +47,7 @@ export function CalibrationForm({ instruments, replaces, today, onDone }: Calibr
   });
   return (
     <form noValidate className="mt-6" onSubmit={(event) => void submit(event)}>
-      <RuleHead small level={3}>
-        {replaces ? `Replace ${replaces.code}` : 'Enter a calibration'}
-      </RuleHead>
+      <RuleHead small>{replaces ? `Replace ${replaces.code}` : 'Enter a calibration'}</RuleHead>
       {replaces ? <Reach calibration={replaces} /> : null}
       <div className="mt-3 grid grid-cols-2 items-start gap-4 narrow:grid-cols-1">
         {replaces ? null : (

@@ -19,9 +19,7 @@ export function InstrumentForm({ onDone }: { onDone: () => void }) {
   const submit = handleSubmit((entered) => mutate(entered, { onSuccess: onDone }));
   return (
     <form noValidate className="mt-6" onSubmit={(event) => void submit(event)}>
-      <RuleHead small level={3}>
-        Enter an instrument
-      </RuleHead>
+      <RuleHead small>Enter an instrument</RuleHead>
       <div className="mt-3 grid grid-cols-2 items-start gap-4 narrow:grid-cols-1">
         <TextField label="Name" {...register('name')} error={formState.errors.name?.message} />
         <SelectField label="Kind" {...register('kind')}>

@@ -30,7 +30,7 @@ export function ToolTray({ tool, onPick, choices, closedBecause }: ToolTrayProps
     tray.current?.querySelectorAll('button')[next]?.focus();
   };
   return (
-    <section aria-label="Marks to draw" className="bench-panel">
+    <section aria-label="Marks to draw" className="bench-panel" tabIndex={closedBecause ? 0 : undefined}>
       <h2 className="bench-title">
         Mark <small>{tool && tool !== 'scale bar' ? choices : 'letter picks, arrows aim, Enter sets'}</small>
       </h2>

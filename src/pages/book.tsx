@@ -31,8 +31,15 @@ export function placesOf(person: Person): Place[] {
   return [
     { to: '/', words: person.organisationKind === 'laboratory' ? 'Casebook' : 'My requests' },
     ...(staff ? [{ to: '/materials', words: 'Materials' }] : []),
-    ...(mayInLaboratory(person, 'keep people').allowed ? [{ to: '/laboratory', words: 'Laboratory' }] : []),
+    ...laboratoryPlace(person),
   ];
+}
+
+/** The laboratory opens on its people for who keeps them, and on its instruments for its other staff. */
+function laboratoryPlace(person: Person): Place[] {
+  if (mayInLaboratory(person, 'keep people').allowed) return [{ to: '/laboratory', words: 'Laboratory' }];
+  if (!mayInLaboratory(person, 'read calibrations').allowed) return [];
+  return [{ to: '/laboratory/instruments', words: 'Laboratory' }];
 }
 
 const placeOfLetter: Readonly<Record<string, string>> = { c: '/', m: '/materials' };

@@ -57,16 +57,10 @@ function PlaceLink({ place, current }: { place: Place; current?: boolean }) {
 
 function FindLink({ to }: { to: string }) {
   return (
-    <Link
-      className="find"
-      to={to}
-      aria-label="Find a case, lot or mark"
-      title="Find a case, lot or mark"
-      aria-keyshortcuts="/"
-    >
+    <Link className="find" to={to} aria-label="Find a case" title="Find a case" aria-keyshortcuts="/">
       <span className="find-line">
         <MagnifyingGlassIcon size={16} aria-hidden />
-        <span>Find a case, lot or mark</span>
+        <span>Find a case</span>
         <kbd aria-hidden>/</kbd>
       </span>
       <MagnifyingGlassIcon size={20} aria-hidden />

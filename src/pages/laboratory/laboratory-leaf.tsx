@@ -53,10 +53,14 @@ function Leaf() {
 }
 
 function InstrumentsLeaf() {
+  const { organisationName } = usePerson();
   return (
     <main id="content">
       <div className="case-head">
-        <h1>Laboratory</h1>
+        <div>
+          <span className="mb-1 block min-h-[21px] text-m text-ink-2">{organisationName}</span>
+          <h1>Laboratory</h1>
+        </div>
       </div>
       <Chapters label="Chapters of the laboratory">
         <NavLink to="instruments">

@@ -8,13 +8,13 @@ import { Spread } from '../../ui/spread.tsx';
 export function Component() {
   return (
     <Spread>
-      <Page label="Outgoing mail" folio={{ chapter: 'ii', words: 'Outgoing mail', side: 'left' }}>
+      <Page label="Outgoing mail" folio={{ chapter: 'iii', words: 'Outgoing mail', side: 'left' }}>
         <RuleHead level={2} aside="number, state and link only">
           Outgoing mail
         </RuleHead>
         <OutgoingMails />
       </Page>
-      <Page label="Held on this machine" folio={{ chapter: 'ii', words: 'Held on this machine', side: 'right' }}>
+      <Page label="Held on this machine" folio={{ chapter: 'iii', words: 'Held on this machine', side: 'right' }}>
         <RuleHead level={2} aside="while no mail server is configured">
           Held on this machine
         </RuleHead>

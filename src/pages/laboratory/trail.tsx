@@ -11,7 +11,7 @@ export function Component() {
   const people = useQuery(peopleQuery);
   return (
     <Spread shape="single">
-      <Page label="Audit trail" folio={{ chapter: 'iii', words: 'Audit trail', side: 'left' }}>
+      <Page label="Audit trail" folio={{ chapter: 'iv', words: 'Audit trail', side: 'left' }}>
         <RuleHead level={2} aside="newest first, times in UTC; nothing is edited or removed">
           Audit trail
         </RuleHead>

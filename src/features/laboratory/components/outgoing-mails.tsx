@@ -9,6 +9,7 @@ import { LoadingState } from '#src/ui/loading-state.tsx';
 import { Table } from '#src/ui/table.tsx';
 import { Th } from '#src/ui/th.tsx';
 import { mailsQuery, useLaboratoryActs } from '../api.ts';
+import { MailAddress } from './mail-address.tsx';
 import { OlderButton } from './older-button.tsx';
 import { whenWords } from './when.ts';
 
@@ -36,7 +37,9 @@ export function OutgoingMails() {
           {mails.map((mail) => (
             <tr key={mail.id}>
               <td className="whitespace-nowrap text-ink-2">{whenWords(mail.writtenAt, now)}</td>
-              <td className="is-wide break-all">{mail.toMail}</td>
+              <td className="is-wide">
+                <MailAddress address={mail.toMail} />
+              </td>
               <td className="is-wide">{mail.subject}</td>
               <td className="is-wide py-1">
                 <MailFate mail={mail} />

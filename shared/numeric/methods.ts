@@ -8,10 +8,10 @@ import { mirrorStress } from './methods/mirror-stress.ts';
 
 /** Every method that can be run, all versions of each. A changed formula is one more entry; none is ever taken out. */
 export const methods: readonly Method[] = [
-  bend3Rect,
   bend4Rect,
-  bend3RectLocal,
   bend4RectLocal,
+  bend3Rect,
+  bend3RectLocal,
   mirrorStress,
   flawStress,
 ];

@@ -48,8 +48,10 @@ export function FollowedCase({ followed }: { followed: Followed }) {
             </ol>
           )}
           <p className="prose-measure mt-5">
-            What is found is told once it has been checked and signed. “We don’t know” is a good answer where a face
-            cannot be read.
+            {followed.plainState === 'answered'
+              ? 'The findings are checked and signed. The laboratory hands them over; ask it where they have not come.'
+              : 'What is found is told once it has been checked and signed.'}{' '}
+            “We don’t know” is a good answer where a face cannot be read.
           </p>
         </Page>
       </Spread>

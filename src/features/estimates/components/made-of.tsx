@@ -27,7 +27,7 @@ export function MadeOf({ budget }: { budget: readonly BudgetView[] }) {
               {row.label} <SymbolWord symbol={row.symbol} />
             </th>
             <td className="num whitespace-nowrap text-ink-2">
-              <SetText text={row.plusMinus} />
+              {row.standardUncertainty === 0 ? 'none stated' : <SetText text={row.plusMinus} />}
             </td>
             <td className="num whitespace-nowrap">
               ± {formatNumber(coverageFactor * row.contribution, { decimals: 1 })}

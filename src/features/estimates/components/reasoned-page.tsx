@@ -42,24 +42,43 @@ export function ReasonedPage({ caseNumber, view, materialId, mayEstimate }: Reas
   const heads = inLineOrder(estimates.filter((each) => each.supersededById === null));
   const chosen = estimates.find((each) => each.id === chosenId) ?? toLookAt(compared) ?? estimates.at(-1);
   const stale = heads.filter((each) => each.stale !== null);
+  const lines = (
+    <>
+      <RuleHead aside={asideOf(compared.length)}>Stress at the origin</RuleHead>
+      <LinesOfEvidence rows={evidenceLines(estimates)} />
+    </>
+  );
+  const verdict = <VerdictSentence agreement={agreement} />;
+  const inputs = (
+    <InputsTable estimates={heads} caseNumber={caseNumber} chosenId={chosen?.id ?? null} onChosen={setChosenId} />
+  );
+  const lineage = chosen ? <LineageTree estimate={chosen} /> : null;
   return (
     <>
-      <WithMargin
-        margin={
-          <div className="grid gap-4 min-[641px]:pt-7">
-            {stale.map((each) => (
-              <StaleLine key={each.id} estimate={each} {...{ caseNumber, mayEstimate }} />
-            ))}
-          </div>
-        }
-      >
-        <RuleHead aside={asideOf(compared.length)}>Stress at the origin</RuleHead>
-        <LinesOfEvidence rows={evidenceLines(estimates)} />
-      </WithMargin>
-      <VerdictSentence agreement={agreement} />
-      <WithMargin margin={chosen ? <LineageTree estimate={chosen} /> : null} className="mt-3">
-        <InputsTable estimates={heads} caseNumber={caseNumber} chosenId={chosen?.id ?? null} onChosen={setChosenId} />
-      </WithMargin>
+      {stale.length > 0 ? (
+        <WithMargin
+          margin={
+            <div className="grid gap-4 min-[641px]:pt-7">
+              {stale.map((each) => (
+                <StaleLine key={each.id} estimate={each} {...{ caseNumber, mayEstimate }} />
+              ))}
+              {lineage}
+            </div>
+          }
+        >
+          {lines}
+          {verdict}
+          {inputs}
+        </WithMargin>
+      ) : (
+        <>
+          <WithMargin margin={null}>{lines}</WithMargin>
+          {verdict}
+          <WithMargin margin={lineage} className="mt-3">
+            {inputs}
+          </WithMargin>
+        </>
+      )}
       <NewEstimate mayEstimate={mayEstimate} onMake={make} />
       {chosen ? (
         <EstimateDetail

@@ -1,7 +1,7 @@
 import { useId, useState } from 'react';
 import type { EstimateView } from '#shared/contracts/estimates.ts';
 import type { Answer } from '#shared/rules/may.ts';
-import { formatDay } from '#shared/wording/dates.ts';
+import { formatShortDay } from '#shared/wording/dates.ts';
 import { Refusal } from '#src/http/api.ts';
 import { Button } from '#src/ui/button.tsx';
 import { FieldError } from '#src/ui/field-error.tsx';
@@ -63,11 +63,9 @@ export function StaleLine({ estimate, caseNumber, mayEstimate }: StaleLineProps)
         </FieldError>
       ) : null}
     </>
-  ) : (
-    <span className="text-ink-2">{mayEstimate.reason}</span>
-  );
+  ) : null;
   return (
-    <StaleNote since={formatDay(stale.since)} acts={acts}>
+    <StaleNote since={formatShortDay(stale.since)} acts={acts}>
       <StaleWords estimate={estimate} />
     </StaleNote>
   );

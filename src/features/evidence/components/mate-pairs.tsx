@@ -1,5 +1,6 @@
 import { useState } from 'react';
 import { MatePairView } from '#shared/contracts/evidence.ts';
+import { asSentence } from '#shared/wording/number-words.ts';
 import { Button } from '#src/ui/button.tsx';
 import { FigureCaption } from '#src/ui/figure-caption.tsx';
 import { RuleHead } from '#src/ui/rule-head.tsx';
@@ -44,7 +45,8 @@ function MatePair({ number, pair, pictures, mayChange }: MatePairProps) {
       </div>
       <div className="mt-2 flex flex-wrap items-baseline justify-between gap-x-4">
         <span className="text-s text-ink-2">
-          {pair.crack ? `Crack ${pair.crack}; paired by ` : 'Paired by '} {pair.pairedBy.name}.
+          {pair.crack ? `${asSentence(pair.crack)}; paired by ` : 'Paired by '}
+          {pair.pairedBy.name}.
         </span>
         <span className="acts">
           {bothShown ? (

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { ourUnits } from '../numeric/units/our-units.ts';
 import { constantKinds, sourceStandings } from '../vocabulary/constant-kinds.ts';
 import { estimateLines, verdicts } from '../vocabulary/estimate-lines.ts';
 import { lineageKinds } from '../vocabulary/lineage-kinds.ts';
@@ -7,8 +8,6 @@ import { mirrorBoundaries } from '../vocabulary/mirror-boundaries.ts';
 import { uncertaintyForms } from '../vocabulary/uncertainty-forms.ts';
 import { Named } from './fractographs.ts';
 import { CaseNumber, FractographId } from './ids.ts';
-
-const units = ['mm', 'N', 'MPa', 'MPa√m', 'g', '1'] as const;
 
 /** An input that is typed, with its unit, its uncertainty and how that is stated. */
 export const TypedInput = z.object({
@@ -78,7 +77,7 @@ export const OutputView = z.object({
   /** Null for a plain ratio only. */
   standardUncertainty: z.number().nullable(),
   expandedUncertainty: z.number().nullable(),
-  unit: z.enum(units),
+  unit: z.enum(ourUnits),
 });
 
 export const InputSourceView = z.discriminatedUnion('kind', [
@@ -114,7 +113,7 @@ export const InputView = z.object({
   symbol: z.string(),
   value: z.number(),
   standardUncertainty: z.number(),
-  unit: z.enum(units),
+  unit: z.enum(ourUnits),
   distribution: z.enum(['normal', 'rectangular', 'triangular']),
   /** "291 ± 16 µm", k = 2. */
   text: z.string(),

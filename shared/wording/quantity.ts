@@ -77,6 +77,7 @@ export function echoQuantity(read: QuantityRead): string {
 /** The unit as shown; the ½ is raised by the page. */
 export function unitText(unit: OurUnit): string {
   if (unit === '1') return '';
+  if (unit === '√m') return 'm½';
   return unit === 'MPa√m' ? `MPa${noBreakSpace}m½` : unit;
 }
 

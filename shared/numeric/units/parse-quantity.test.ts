@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { parseQuantity, type QuantityWanted } from './parse-quantity.ts';
+import { ourUnitOf } from './our-units.ts';
 import { unitTable } from './unit-table.ts';
 
 const length: QuantityWanted = { kind: 'length', openUnit: true };
@@ -8,6 +9,7 @@ const stress: QuantityWanted = { kind: 'stress', openUnit: true };
 const toughness: QuantityWanted = { kind: 'toughness', openUnit: true };
 const mass: QuantityWanted = { kind: 'mass', openUnit: true };
 const factor: QuantityWanted = { kind: 'dimensionless', openUnit: false };
+const of = (kind: QuantityWanted['kind']): QuantityWanted => ({ kind, openUnit: true });
 
 function valueOf(text: string, wanted: QuantityWanted): number {
   const answer = parseQuantity(text, wanted);
@@ -62,6 +64,29 @@ describe('a typed quantity', () => {
     ['250mg', mass, 0.25],
     ['1.29', factor, 1.29],
     ['5 %', factor, 0.05],
+    // the same spelling is a modulus where one is wanted
+    ['70 GPa', of('modulus'), 70],
+    ['70000 MPa', of('modulus'), 70],
+    // 10 × 6.894757
+    ['10 Msi', of('modulus'), 68.9476],
+    ['0.5 MPa/s', of('stressRate'), 0.5],
+    ['266 N/mm³', of('stressGradient'), 266],
+    ['45°', of('angle'), 45],
+    ['0.5 rad', of('angle'), 28.6479],
+    ['2 h', of('time'), 7200],
+    ['10 µm/s', of('speed'), 0.6],
+    ['0.02 in/min', of('speed'), 0.508],
+    ['2.1 kN/mm', of('stiffness'), 2100],
+    // 100 × 4.4482216 / 25.4
+    ['100 lbf/in', of('stiffness'), 17.5127],
+    ['0.02 µm/N', of('compliance'), 2e-5],
+    ['90 °F', of('temperatureDifference'), 50],
+    ['60 °C', of('temperatureDifference'), 60],
+    ['8.5 ppm/K', of('expansion'), 8.5e-6],
+    ['9e-6 /K', of('expansion'), 9e-6],
+    ['2000 W/(m² K)', of('heatTransfer'), 2000],
+    ['30 W/m/K', of('conductivity'), 30],
+    ['0.5 MPa² s', of('growthConstant'), 0.5],
   ])('%s is read', (text, wanted, value) => {
     expect(valueOf(text, wanted)).toBeCloseTo(value, value < 1 ? 9 : 4);
   });
@@ -90,6 +115,8 @@ describe('a typed quantity is refused with the reason', () => {
     ['4 lb', mass, '“lb” is not a unit known here: say g, kg or mg.'],
     ['4 N', mass, 'N is a unit of force, and a mass is wanted here: say g, kg or mg.'],
     ['4 mm', factor, 'mm is a unit of length, and a plain number is wanted here.'],
+    ['4 mm', of('angle'), 'mm is a unit of length, and an angle is wanted here: say ° or rad.'],
+    ['4', of('growthConstant'), '4 has no unit: say MPa²·s.'],
     ['1.2.3 mm', length, '“1.2.3” is not a number that can be read.'],
     ['3 1/4 in', length, '“3 1” is not a number that can be read.'],
     ['', factor, 'Type a number.'],
@@ -104,14 +131,14 @@ describe('a typed quantity is refused with the reason', () => {
 });
 
 describe('the table of units', () => {
-  it('spells no two units alike', () => {
-    const spellings = unitTable.flatMap((unit) => unit.spellings);
+  it('spells no two units of a kind alike', () => {
+    const spellings = unitTable.flatMap((unit) => unit.spellings.map((spelling) => `${unit.kind} ${spelling}`));
     expect(new Set(spellings).size).toBe(spellings.length);
   });
 
   it('holds our own unit of each kind with factor 1', () => {
-    for (const kind of ['length', 'force', 'stress', 'toughness', 'mass', 'dimensionless']) {
-      expect(unitTable.find((unit) => unit.kind === kind)?.factor).toBe(1);
+    for (const unit of Object.values(ourUnitOf)) {
+      expect(unitTable.filter((each) => each.spellings.includes(unit)).map((each) => each.factor)).toContain(1);
     }
   });
 });

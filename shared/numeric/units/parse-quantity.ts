@@ -27,6 +27,19 @@ const kindInWords: Readonly<Record<UnitKind, string>> = {
   toughness: 'toughness',
   mass: 'mass',
   dimensionless: 'plain ratio',
+  modulus: 'modulus',
+  stressRate: 'stress rate',
+  stressGradient: 'stress gradient',
+  angle: 'angle',
+  speed: 'speed',
+  stiffness: 'stiffness',
+  compliance: 'compliance',
+  time: 'time',
+  temperatureDifference: 'temperature difference',
+  expansion: 'thermal expansion',
+  heatTransfer: 'heat transfer',
+  conductivity: 'heat conductivity',
+  growthConstant: 'constant of slow growth',
 };
 
 // Masses that are typed where a force is meant.
@@ -65,7 +78,7 @@ function unitFor(unitText: string, numberText: string, wanted: QuantityWanted): 
   if (unitText === '') return bareUnit(numberText, wanted);
   const forceUnit = forceMeant[unitText.toLowerCase()];
   if (forceUnit && wanted.kind !== 'mass') return refused(massForForce(unitText, forceUnit, wanted.kind));
-  const unit = findUnit(unitText);
+  const unit = findUnit(unitText, wanted.kind);
   if (!unit) return refused(`“${unitText}” is not a unit known here: say ${choices(wanted.kind)}.`);
   if (unit.kind !== wanted.kind) {
     return refused(`${unit.name} is a unit of ${kindInWords[unit.kind]}, and ${wantedInWords(wanted.kind)}.`);
@@ -77,7 +90,7 @@ function bareUnit(numberText: string, wanted: QuantityWanted): Unit | QuantityRe
   if (wanted.openUnit && wanted.kind !== 'dimensionless') {
     return refused(`${numberText} has no unit: say ${choices(wanted.kind)}.`);
   }
-  const unit = findUnit(wanted.defaultUnit ?? ourUnitOf[wanted.kind]);
+  const unit = findUnit(wanted.defaultUnit ?? ourUnitOf[wanted.kind], wanted.kind);
   if (!unit) throw new Error(`No unit “${wanted.defaultUnit}” to read a bare number in`);
   return unit;
 }
@@ -89,7 +102,8 @@ function massForForce(unitText: string, forceUnit: string, kind: UnitKind): stri
 
 function wantedInWords(kind: UnitKind): string {
   if (kind === 'dimensionless') return 'a plain number is wanted here';
-  return `a ${kindInWords[kind]} is wanted here: say ${choices(kind)}`;
+  const article = kind === 'angle' ? 'an' : 'a';
+  return `${article} ${kindInWords[kind]} is wanted here: say ${choices(kind)}`;
 }
 
 function ambiguity(numberText: string): string {
@@ -99,7 +113,7 @@ function ambiguity(numberText: string): string {
 
 function choices(kind: UnitKind): string {
   const names = kind === 'dimensionless' ? ['a plain number', '%'] : unitNamesOf(kind);
-  return `${names.slice(0, -1).join(', ')} or ${names.at(-1)}`;
+  return [names.slice(0, -1).join(', '), names.at(-1)].filter(Boolean).join(' or ');
 }
 
 function refused(reason: string): QuantityRefused {

@@ -25,7 +25,8 @@ describe('the table of methods', () => {
   it('gives every main output a unit and every input and output a label', () => {
     for (const method of methods) {
       const main = method.outputs.find((output) => output.name === method.mainOutput);
-      expect(main?.unit).toBe('MPa');
+      if (method.line !== 'supporting') expect(main?.unit).toBe('MPa');
+      if (method.mainOutput !== undefined) expect(main?.unit, method.id).toBeTruthy();
       for (const named of [...method.inputs, ...method.outputs]) expect(named.label).not.toBe('');
     }
   });

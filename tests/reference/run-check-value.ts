@@ -22,14 +22,16 @@ export const runners: Readonly<Record<string, (inputs: Inputs) => Answer>> = {
   'compare.triple': comparedTriple,
 };
 
-/** Inputs with the uncertainty beside each, spelled u_load or uA. */
+/** Inputs with the uncertainty beside each, spelled u_load or uA; words are codes, and an infinite width is left out. */
 function givenFrom(inputs: Inputs): GivenInputs {
   const names = Object.keys(inputs);
   const uncertaintyNames = new Set(names.flatMap((name) => [`u_${name}`, `u${name}`]).filter((name) => name in inputs));
   return Object.fromEntries(
     names
-      .filter((name) => !uncertaintyNames.has(name))
+      .filter((name) => !uncertaintyNames.has(name) && inputs[name]?.value !== 'infinite')
       .map((name) => {
+        const word = inputs[name]?.value;
+        if (typeof word === 'string') return [name, { code: word }];
         const spelled = [`u_${name}`, `u${name}`].find((each) => each in inputs);
         const stated = spelled === undefined ? {} : { standardUncertainty: numberIn(inputs, spelled) };
         return [name, { value: numberIn(inputs, name), ...stated }];

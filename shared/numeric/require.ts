@@ -21,6 +21,6 @@ export function requireNotNegative(numbers: Named, code: RefusalCode): void {
 }
 
 /** Refuses `field` for the reason `code` unless the condition holds. */
-export function requireThat(holds: boolean, code: RefusalCode, field: string): void {
+export function requireThat(holds: boolean, code: RefusalCode, field: string): asserts holds {
   if (!holds) throw new OutsideDomain(code, field);
 }

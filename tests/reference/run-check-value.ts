@@ -1,5 +1,5 @@
 import { evaluateMethod } from '#shared/numeric/evaluate-method.ts';
-import { methods } from '#shared/numeric/methods.ts';
+import { findCurrentMethod, methods } from '#shared/numeric/methods.ts';
 import type { GivenInputs } from '#shared/numeric/methods/method.ts';
 import { OutsideDomain } from '#shared/numeric/outside-domain.ts';
 import type { EstimateLine } from '#shared/vocabulary/estimate-lines.ts';
@@ -12,27 +12,28 @@ export type Answer = Readonly<Record<string, unknown>>;
 
 /** How each reference method is run: those of the table by the table, the rest by the code that holds them. */
 export const runners: Readonly<Record<string, (inputs: Inputs) => Answer>> = {
-  ...Object.fromEntries(methods.map(({ id }) => [id, (inputs: Inputs) => answerOf(id, givenFrom(inputs))])),
-  'uncertainty.bend3.local': (inputs) => answerOf('bend3.rect.local', givenFrom(inputs)),
-  'uncertainty.bend4.nominal': (inputs) => answerOf('bend4.rect', givenFrom(inputs)),
-  'uncertainty.flaw': (inputs) => answerOf('flaw.stress', givenFrom(inputs)),
-  'mirror.uncertainty': (inputs) => answerOf('mirror.stress', givenFrom(inputs)),
+  ...Object.fromEntries(methods.map(({ id }) => [id, (inputs: Inputs) => answerOf(id, givenFrom(inputs, id))])),
+  'uncertainty.bend3.local': (inputs) => answerOf('bend3.rect.local', givenFrom(inputs, 'bend3.rect.local')),
+  'uncertainty.bend4.nominal': (inputs) => answerOf('bend4.rect', givenFrom(inputs, 'bend4.rect')),
+  'uncertainty.flaw': (inputs) => answerOf('flaw.stress', givenFrom(inputs, 'flaw.stress')),
   'compare.pair': comparedPair,
   'compare.pair.correlated': comparedPair,
   'compare.triple': comparedTriple,
 };
 
-/** Inputs with the uncertainty beside each, spelled u_load or uA; words are codes, and an infinite width is left out. */
-function givenFrom(inputs: Inputs): GivenInputs {
-  const names = Object.keys(inputs);
-  const uncertaintyNames = new Set(names.flatMap((name) => [`u_${name}`, `u${name}`]).filter((name) => name in inputs));
+/** Inputs with the uncertainty beside each, spelled u_load or uA, unless the method has an input of that name itself. */
+function givenFrom(inputs: Inputs, id: string): GivenInputs {
+  const own = new Set(findCurrentMethod(id)?.inputs.map((input) => input.name));
+  const uncertaintyOf = (name: string) =>
+    [`u_${name}`, `u${name}`].find((spelled) => spelled in inputs && !own.has(spelled));
+  const uncertainties = new Set(Object.keys(inputs).map(uncertaintyOf));
   return Object.fromEntries(
-    names
-      .filter((name) => !uncertaintyNames.has(name) && inputs[name]?.value !== 'infinite')
-      .map((name) => {
-        const word = inputs[name]?.value;
-        if (typeof word === 'string') return [name, { code: word }];
-        const spelled = [`u_${name}`, `u${name}`].find((each) => each in inputs);
+    Object.entries(inputs)
+      .filter(([name]) => !uncertainties.has(name))
+      .map(([name, { value }]): [string, GivenInputs[string]] => {
+        if (typeof value === 'string') return [name, { code: value }];
+        if (Array.isArray(value)) return [name, { values: value.map((each) => each ?? Number.NaN) }];
+        const spelled = uncertaintyOf(name);
         const stated = spelled === undefined ? {} : { standardUncertainty: numberIn(inputs, spelled) };
         return [name, { value: numberIn(inputs, name), ...stated }];
       }),

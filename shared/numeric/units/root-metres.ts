@@ -8,3 +8,11 @@ const mmPerMetre = 1000;
 export function rootMetresFromMm(lengthMm: number): number {
   return Math.sqrt(lengthMm / mmPerMetre);
 }
+
+/**
+ * A length in mm from its root in √m, ≥ 0: the same step back.
+ * @example mmFromRootMetres(0.01581) // 0.2499…
+ */
+export function mmFromRootMetres(rootMetres: number): number {
+  return rootMetres ** 2 * mmPerMetre;
+}

@@ -71,7 +71,7 @@ function SeenFigure({ number, estimates }: { number: string; estimates: Estimate
         <FigureWithMarks caseNumber={number} fractograph={shown} marks={marks.filter((mark) => !mark.removed)} />
         <FigureCaption number={`Fig. ${shown.figureNumber}`}>
           {captionOf(shown)}{' '}
-          <Link className="whitespace-nowrap" to={`/cases/${number}/fractographs/${shown.id}`}>
+          <Link className="screen-only whitespace-nowrap" to={`/cases/${number}/fractographs/${shown.id}`}>
             Open on the bench
           </Link>
         </FigureCaption>

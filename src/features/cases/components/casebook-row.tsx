@@ -49,7 +49,9 @@ export function CasebookTableRow({ row, asOf, oldestDays, personId, lines }: Cas
       <td className="mono whitespace-nowrap">
         <Link to={`/cases/${row.number}`}>{row.number}</Link>
       </td>
-      <td className={joinClasses('is-wide', gone ? 'text-ink-3' : 'font-semibold')}>
+      <td
+        className={joinClasses('is-wide min-w-[170px] [overflow-wrap:anywhere]', gone ? 'text-ink-3' : 'font-semibold')}
+      >
         {row.title}
         {row.urgency === 'exposed now' && !row.closedAt && !gone ? (
           <span className="block text-s text-iron">

@@ -26,8 +26,8 @@ export function ReadinessList({ review, acts, title }: ReadinessListProps) {
         </p>
       ) : (
         <ul>
-          {readiness.map((point) => (
-            <Point key={`${point.code} ${point.sentence}`} point={point} review={review} acts={acts} />
+          {readiness.map((point, index) => (
+            <Point key={`${point.code} ${point.sentence} ${index}`} point={point} review={review} acts={acts} />
           ))}
         </ul>
       )}

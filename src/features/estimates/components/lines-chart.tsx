@@ -171,7 +171,7 @@ function Axis({ axis, place }: { axis: StressAxis; place: Place }) {
             y={y + 21}
             textAnchor={place.narrow && index === last ? 'end' : 'middle'}
           >
-            {place.narrow && index === last ? `${stress} MPa` : stress}
+            {place.narrow && index === last ? `${stress}\u00a0MPa,\u00a0k\u00a0=\u00a02` : stress}
           </text>
         ))}
         {place.narrow ? null : (

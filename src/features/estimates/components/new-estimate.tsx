@@ -5,7 +5,7 @@ type NewEstimateProps = { mayEstimate: Answer; onMake: (line: EstimateLine) => v
 
 /** The way to a new estimate of each line, or why there is none. */
 export function NewEstimate({ mayEstimate, onMake }: NewEstimateProps) {
-  if (!mayEstimate.allowed) return <p className="mt-3 text-s text-ink-2">{mayEstimate.reason}</p>;
+  if (!mayEstimate.allowed) return <p className="screen-only mt-3 text-s text-ink-2">{mayEstimate.reason}</p>;
   return (
     <div className="acts mt-3">
       {estimateLines.map((line) => (

@@ -26,7 +26,7 @@ export function Reach({ inForce }: { inForce: ConstantView }) {
           {counted(cases, 'case')} turn stale.
         </b>{' '}
         {closedCases > 0
-          ? `${asSentence(counted(closedCases, 'of them is closed', 'of them are closed'))}: nothing in it is touched, and its staleness is told beside it.`
+          ? `${asSentence(counted(closedCases, 'of them is closed', 'of them are closed'))}: nothing in ${closedCases === 1 ? 'it' : 'them'} is touched; what is stale is told beside it.`
           : null}
       </p>
       <Table caption="Cases reached">

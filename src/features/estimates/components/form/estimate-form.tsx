@@ -57,6 +57,7 @@ export function EstimateForm({ caseNumber, line, again, materialId: caseMaterial
         </RuleHead>
         <SelectField
           label="Method"
+          autoFocus
           help={<SetText text={`${method.formula.symbols}; ${method.source.text}`} />}
           {...form.register('method')}
         >

@@ -25,10 +25,11 @@ export function TypedEntry({ input, wrong, errorId }: TypedEntryProps) {
   return (
     <>
       <div
-        className={`grid gap-3 [&>*]:min-w-0 ${isExpected ? 'grid-cols-2 min-[640px]:grid-cols-[minmax(0,10fr)_minmax(0,10fr)_minmax(0,15fr)_minmax(0,17fr)]' : 'min-[640px]:grid-cols-2'}`}
+        className={`grid gap-3 [&>*]:min-w-0 ${isExpected ? 'grid-cols-2 min-[640px]:grid-cols-[minmax(0,9fr)_minmax(0,9fr)_minmax(0,18fr)_minmax(0,15fr)]' : 'min-[640px]:grid-cols-2'}`}
       >
         <EntryField
           label={input.openUnit ? 'Value, unit' : 'Value'}
+          hint={input.openUnit && input.unit !== '1' ? `in ${input.unit}` : undefined}
           wrongBy={toldBy('value')}
           field={register(`${path}.text`)}
         />
@@ -52,10 +53,10 @@ export function TypedEntry({ input, wrong, errorId }: TypedEntryProps) {
   );
 }
 
-type EntryFieldProps = { label: string; wrongBy: string | null; field: UseFormRegisterReturn };
+type EntryFieldProps = { label: string; hint?: string; wrongBy: string | null; field: UseFormRegisterReturn };
 
 /** One line of a group whose error stands under the whole group. */
-function EntryField({ label, wrongBy, field }: EntryFieldProps) {
+function EntryField({ label, hint, wrongBy, field }: EntryFieldProps) {
   return (
     <FieldFrame label={label}>
       {({ id }, boxClass) => (
@@ -66,6 +67,7 @@ function EntryField({ label, wrongBy, field }: EntryFieldProps) {
             {...field}
             id={id}
             size={1}
+            placeholder={hint}
             aria-invalid={wrongBy === null ? undefined : true}
             aria-describedby={wrongBy ?? undefined}
           />

@@ -9,17 +9,14 @@ const groups: readonly { where: string; keys: readonly (readonly [keys: string, 
       ['/', 'find'],
       ['?', 'this list'],
       ['G C', 'Casebook'],
-      ['G L', 'Lots'],
       ['G M', 'Materials'],
-      ['G K', 'Look-back'],
-      ['G O', 'Overview'],
       ['Esc', 'back out one step'],
     ],
   },
   {
     where: 'Case and tables',
     keys: [
-      ['1 – 7', 'chapters of the case'],
+      ['1 to 7', 'chapters of the case'],
       ['↑ ↓', 'row by row'],
       ['Enter', 'open the row'],
       ['Home End', 'first and last row'],
@@ -43,8 +40,8 @@ const groups: readonly { where: string; keys: readonly (readonly [keys: string, 
     where: 'Findings',
     keys: [
       ['Ctrl K', 'bind a value'],
-      ['Ctrl Alt M', 'comment'],
-      ['Alt ↓', 'next thing to settle'],
+      ['Ctrl B', 'bold'],
+      ['Ctrl I', 'italic'],
     ],
   },
 ];
@@ -70,7 +67,7 @@ export function KeyListDialog({ open, onOpenChange }: KeyListDialogProps) {
               {group.keys.map(([keys, does]) => (
                 <div key={keys} className="col-span-2 grid grid-cols-subgrid border-b border-hairline py-1">
                   <dt className="flex flex-wrap items-start gap-1 pt-px">
-                    {keys.split(' ').map((key) => (key === '–' ? key : <Kbd key={key}>{key}</Kbd>))}
+                    {keys.split(' ').map((key) => (key === 'to' ? key : <Kbd key={key}>{key}</Kbd>))}
                   </dt>
                   <dd>{does}</dd>
                 </div>

@@ -50,7 +50,7 @@ export function CasebookTableRow({ row, asOf, oldestDays, personId, lines }: Cas
         <Link to={`/cases/${row.number}`}>{row.number}</Link>
       </td>
       <td
-        className={joinClasses('is-wide min-w-[170px] [overflow-wrap:anywhere]', gone ? 'text-ink-3' : 'font-semibold')}
+        className={joinClasses('is-wide min-w-[150px] [overflow-wrap:anywhere]', gone ? 'text-ink-3' : 'font-semibold')}
       >
         {row.title}
         {row.urgency === 'exposed now' && !row.closedAt && !gone ? (

@@ -1,8 +1,22 @@
 import { bend3RectLocal } from './methods/bend3-rect-local.ts';
 import { bend3Rect } from './methods/bend3-rect.ts';
+import { bend3RodLocal } from './methods/bend3-rod-local.ts';
+import { bend3Rod } from './methods/bend3-rod.ts';
 import { bend4RectLocal } from './methods/bend4-rect-local.ts';
 import { bend4Rect } from './methods/bend4-rect.ts';
+import { bend4RodLocalAngle } from './methods/bend4-rod-local-angle.ts';
+import { bend4RodLocal } from './methods/bend4-rod-local.ts';
+import { bend4Rod } from './methods/bend4-rod.ts';
+import { cantileverRod } from './methods/cantilever-rod.ts';
+import { discPistonOnThreeBallsLocal } from './methods/disc-piston-on-three-balls-local.ts';
+import { discPistonOnThreeBalls } from './methods/disc-piston-on-three-balls.ts';
+import { discRingOnRingLocal } from './methods/disc-ring-on-ring-local.ts';
+import { discRingOnRing } from './methods/disc-ring-on-ring.ts';
+import { comparePairCorrelated } from './methods/compare-pair-correlated.ts';
+import { comparePair } from './methods/compare-pair.ts';
+import { compareTriple } from './methods/compare-triple.ts';
 import { flawStress } from './methods/flaw-stress.ts';
+import { loadGiven } from './methods/load-given.ts';
 import type { Method } from './methods/method.ts';
 import { mirrorAverageRadiusEllipse } from './methods/mirror-average-radius-ellipse.ts';
 import { mirrorAverageRadiusSurface } from './methods/mirror-average-radius-surface.ts';
@@ -16,6 +30,15 @@ import { mirrorRadius } from './methods/mirror-radius.ts';
 import { mirrorResidual } from './methods/mirror-residual.ts';
 import { mirrorStress } from './methods/mirror-stress.ts';
 import { mirrorUncertainty } from './methods/mirror-uncertainty.ts';
+import { originCodeParse } from './methods/origin-code-parse.ts';
+import { plateSupportedPressure } from './methods/plate-supported-pressure.ts';
+import { yCornerNewmanRaju } from './methods/y-corner-newman-raju.ts';
+import { yEdgeBending } from './methods/y-edge-bending.ts';
+import { yEdgeTension } from './methods/y-edge-tension.ts';
+import { yEmbeddedEllipse } from './methods/y-embedded-ellipse.ts';
+import { yEmbeddedNewmanRaju } from './methods/y-embedded-newman-raju.ts';
+import { yEmbeddedQApprox } from './methods/y-embedded-q-approx.ts';
+import { ySurfaceNewmanRaju } from './methods/y-surface-newman-raju.ts';
 
 /** Every method that can be run, all versions of each. A changed formula is one more entry; none is ever taken out. */
 export const methods: readonly Method[] = [
@@ -23,6 +46,18 @@ export const methods: readonly Method[] = [
   bend4RectLocal,
   bend3Rect,
   bend3RectLocal,
+  bend4Rod,
+  bend4RodLocal,
+  bend4RodLocalAngle,
+  bend3Rod,
+  bend3RodLocal,
+  cantileverRod,
+  discRingOnRing,
+  discRingOnRingLocal,
+  discPistonOnThreeBalls,
+  discPistonOnThreeBallsLocal,
+  plateSupportedPressure,
+  loadGiven,
   mirrorStress,
   mirrorRadius,
   mirrorResidual,
@@ -36,6 +71,17 @@ export const methods: readonly Method[] = [
   mirrorFitIntercept,
   mirrorFitLoglog,
   flawStress,
+  ySurfaceNewmanRaju,
+  yCornerNewmanRaju,
+  yEmbeddedEllipse,
+  yEmbeddedQApprox,
+  yEmbeddedNewmanRaju,
+  yEdgeBending,
+  yEdgeTension,
+  comparePair,
+  comparePairCorrelated,
+  compareTriple,
+  originCodeParse,
 ];
 
 /** The method of that id and version, or nothing. */

@@ -23,6 +23,8 @@ export const refusalCodes = [
   'too-few-points',
   'points-in-line',
   'points-not-on-an-ellipse',
+  'not-a-choice',
+  'unreadable-code',
   'missing-uncertainty',
   'negative-uncertainty',
   'unknown-method',

@@ -1,39 +1,11 @@
+import { agreementPattern, type AgreementPattern } from '../numeric/comparison/agreement-pattern.ts';
+import { chiSquaredLimit } from '../numeric/comparison/chi-squared-limit.ts';
+import { judgePair, type PairJudged, type PairVerdict } from '../numeric/comparison/judge-pair.ts';
 import { pooledStress, type PooledStress } from '../numeric/comparison/pooled-stress.ts';
-import { stressDifference, type StressPair } from '../numeric/comparison/stress-difference.ts';
 import type { EstimateLine, Verdict } from '../vocabulary/estimate-lines.ts';
-import { agreementPattern, type AgreementPattern } from './agreement-pattern.ts';
 
 /** Version of the rule below; kept with every verdict, so that an old one can be read by the rule it was given under. */
 export const agreementRuleVersion = 1;
-
-// In standard uncertainties of the difference: 2 is |E_n| = 1, 3 is |E_n| = 1.5.
-const zetaAgree = 2;
-const zetaDoubtful = 3;
-// Above this u/σ the test could not have failed by less than half the stress.
-const weakRelativeUncertainty = 0.25;
-// 95 % points of χ² by degrees of freedom.
-const chiSquaredLimits: Readonly<Record<number, number>> = { 1: 3.841, 2: 5.991 };
-
-export type PairVerdict = Exclude<Verdict, 'too few'>;
-export type PairJudged = {
-  readonly zeta: number;
-  readonly en: number;
-  readonly verdict: PairVerdict;
-  /** Beside "agree" only: one side is so uncertain that agreeing says little. */
-  readonly weakly: boolean;
-};
-
-/**
- * Verdict on two stresses at the same point and of the same kind.
- * @throws OutsideDomain missing-uncertainty and others, as `stressDifference`
- */
-export function judgePair(pair: StressPair): PairJudged {
-  const { zeta, en } = stressDifference(pair);
-  const apart = Math.abs(zeta);
-  const verdict = apart <= zetaAgree ? 'agree' : apart <= zetaDoubtful ? 'doubtful' : 'disagree';
-  const relative = Math.max(pair.u1MPa / Math.abs(pair.stress1MPa), pair.u2MPa / Math.abs(pair.stress2MPa));
-  return { zeta, en, verdict, weakly: verdict === 'agree' && relative > weakRelativeUncertainty };
-}
 
 /** An input that several lines may share, such as the scale of one image. */
 export type SharedInput = {
@@ -85,7 +57,7 @@ export function judgeAgreement(readings: readonly LineReading[]): Agreement {
   if (pairs.length === 0) return { ...nothingToCompare, ruleVersion: agreementRuleVersion };
   const covariancesMPa2 = counted.map((one) => counted.map((other) => covariance(one, other)));
   const pooled = pooledStress({ stressesMPa: counted.map((reading) => reading.stressMPa), covariancesMPa2 });
-  const limit = chiSquaredLimits[counted.length - 1];
+  const limit = chiSquaredLimit(counted.length);
   const chiSquaredOverLimit = limit !== undefined && pooled.chiSquared > limit;
   const worst = worstOf(pairs);
   const verdict = worst === 'agree' && chiSquaredOverLimit ? 'doubtful' : worst;

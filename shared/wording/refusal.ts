@@ -26,6 +26,9 @@ const sentences: Readonly<Record<RefusalCode, (field: string) => string>> = {
   'points-in-line': (field) => `${field} lie on one line: place them further round the curve.`,
   'points-not-on-an-ellipse': (field) =>
     `${field} do not lie on an ellipse about this centre: place more of them round it.`,
+  'not-a-choice': (field) => `${field} is not one of the choices: choose one of them.`,
+  'unreadable-code': (field) =>
+    `${field} cannot be read: write codes such as P^V, joined by one kind of &, / or +, each with ? where it is not certain.`,
   'missing-uncertainty': (field) => `${field} has no uncertainty: state one that is more than 0.`,
   'negative-uncertainty': (field) => `The uncertainty of ${field} must be 0 or more.`,
   'unknown-method': (field) => `There is no method “${field}” in this version: choose one from the list.`,

@@ -1,10 +1,6 @@
 import { evaluateMethod } from '#shared/numeric/evaluate-method.ts';
 import { findCurrentMethod, methods } from '#shared/numeric/methods.ts';
 import type { GivenInputs } from '#shared/numeric/methods/method.ts';
-import { OutsideDomain } from '#shared/numeric/outside-domain.ts';
-import type { EstimateLine } from '#shared/vocabulary/estimate-lines.ts';
-import { judgeAgreement, judgePair, type LineReading } from '#shared/rules/agreement.ts';
-import type { AgreementPattern } from '#shared/rules/agreement-pattern.ts';
 import { numberIn, type CheckValue } from './check-values.ts';
 
 type Inputs = CheckValue['inputs'];
@@ -16,12 +12,14 @@ export const runners: Readonly<Record<string, (inputs: Inputs) => Answer>> = {
   'uncertainty.bend3.local': (inputs) => answerOf('bend3.rect.local', givenFrom(inputs, 'bend3.rect.local')),
   'uncertainty.bend4.nominal': (inputs) => answerOf('bend4.rect', givenFrom(inputs, 'bend4.rect')),
   'uncertainty.flaw': (inputs) => answerOf('flaw.stress', givenFrom(inputs, 'flaw.stress')),
-  'compare.pair': comparedPair,
-  'compare.pair.correlated': comparedPair,
-  'compare.triple': comparedTriple,
+  'uncertainty.ringOnRing': (inputs) => answerOf('disc.ringOnRing', exactly(givenFrom(inputs, 'disc.ringOnRing'))),
+  'load.given': (inputs) => answerOf('load.given', givenStress(inputs)),
 };
 
-/** Inputs with the uncertainty beside each, spelled u_load or uA, unless the method has an input of that name itself. */
+/**
+ * Inputs with the uncertainty beside each, spelled u_load or uA, unless the method has an input of that name itself; words
+ * are codes, and an infinite width is left out.
+ */
 function givenFrom(inputs: Inputs, id: string): GivenInputs {
   const own = new Set(findCurrentMethod(id)?.inputs.map((input) => input.name));
   const uncertaintyOf = (name: string) =>
@@ -29,7 +27,7 @@ function givenFrom(inputs: Inputs, id: string): GivenInputs {
   const uncertainties = new Set(Object.keys(inputs).map(uncertaintyOf));
   return Object.fromEntries(
     Object.entries(inputs)
-      .filter(([name]) => !uncertainties.has(name))
+      .filter(([name, { value }]) => !uncertainties.has(name) && value !== 'infinite')
       .map(([name, { value }]): [string, GivenInputs[string]] => {
         if (typeof value === 'string') return [name, { code: value }];
         if (Array.isArray(value)) return [name, { values: value.map((each) => each ?? Number.NaN) }];
@@ -40,6 +38,22 @@ function givenFrom(inputs: Inputs, id: string): GivenInputs {
   );
 }
 
+/** The same inputs, each stated to be exact, so that the sensitivities are given. */
+function exactly(given: GivenInputs): GivenInputs {
+  return Object.fromEntries(
+    Object.entries(given).map(([name, input]) => [
+      name,
+      'value' in input ? { ...input, standardUncertainty: 0 } : input,
+    ]),
+  );
+}
+
+/** The stress with its uncertainty, which the method takes as one input and the reference spells as two. */
+function givenStress(inputs: Inputs): GivenInputs {
+  const stated = 'uStress' in inputs ? { standardUncertainty: numberIn(inputs, 'uStress') } : {};
+  return { stress: { value: numberIn(inputs, 'stress'), ...stated } };
+}
+
 function answerOf(id: string, given: GivenInputs): Answer {
   const answer = evaluateMethod(id, 1, given);
   if (answer.kind === 'refused') return { refusal: answer.code };
@@ -48,49 +62,4 @@ function answerOf(id: string, given: GivenInputs): Answer {
   const sensitivities = Object.fromEntries(budget.map((row) => [`c_${row.input}`, row.sensitivity]));
   const relativeUncertainty = estimated.standardUncertainty / estimated.value;
   return { ...outputs, ...sensitivities, uStress: estimated.standardUncertainty, relativeUncertainty };
-}
-
-function comparedPair(inputs: Inputs): Answer {
-  try {
-    const { zeta, en, verdict } = judgePair({
-      stress1MPa: numberIn(inputs, 'stress1'),
-      u1MPa: numberIn(inputs, 'u1'),
-      stress2MPa: numberIn(inputs, 'stress2'),
-      u2MPa: numberIn(inputs, 'u2'),
-      covarianceMPa2: 'covariance' in inputs ? numberIn(inputs, 'covariance') : 0,
-    });
-    return { zeta, En: en, verdict };
-  } catch (refusal) {
-    if (refusal instanceof OutsideDomain) return { refusal: refusal.code };
-    throw refusal;
-  }
-}
-
-function comparedTriple(inputs: Inputs): Answer {
-  const reading = (line: EstimateLine, stress: string, uncertainty: string): LineReading => ({
-    line,
-    stressMPa: numberIn(inputs, stress),
-    standardUncertaintyMPa: numberIn(inputs, uncertainty),
-    setAside: false,
-    shared: [],
-  });
-  const agreement = judgeAgreement([
-    reading('load', 'loadStress', 'uLoad'),
-    reading('mirror', 'mirrorStress', 'uMirror'),
-    reading('flaw', 'flawStress', 'uFlaw'),
-  ]);
-  const [loadMirror, loadFlaw, mirrorFlaw] = agreement.pairs;
-  return {
-    zetaLoadMirror: loadMirror?.zeta,
-    zetaLoadFlaw: loadFlaw?.zeta,
-    zetaMirrorFlaw: mirrorFlaw?.zeta,
-    chi2: agreement.chiSquared,
-    pattern: agreement.pattern && patternCode(agreement.pattern),
-    pooledStress: agreement.pooled?.stressMPa,
-    uPooled: agreement.pooled?.standardUncertaintyMPa,
-  };
-}
-
-function patternCode(pattern: AgreementPattern): string {
-  return pattern.kind === 'outlier' ? `${pattern.line}-${pattern.side}` : pattern.kind;
 }

@@ -31,6 +31,7 @@ export type NumberInput = Measured & { readonly kind: 'number'; readonly default
 export type ListInput = Measured & { readonly kind: 'list'; readonly fewest: number };
 export type CodeInput = Named & {
   readonly kind: 'code';
+  /** Empty where the method reads what is written by rules of its own. */
   readonly choices: readonly { readonly code: string; readonly label: string }[];
   readonly default?: string;
   readonly optional?: true;
@@ -53,7 +54,7 @@ export type GivenList = { readonly values: readonly number[]; readonly standardU
 export type GivenCode = { readonly code: string };
 export type GivenInputs = Readonly<Record<string, GivenNumber | GivenList | GivenCode>>;
 
-export type Outputs = Readonly<Record<string, number | string | boolean | readonly number[]>>;
+export type Outputs = Readonly<Record<string, number | string | boolean | readonly number[] | readonly string[]>>;
 
 /** Something to know beside a number that is still given. */
 export type Caution = { readonly code: string; readonly weight: 'note' | 'warning'; readonly sentence: string };

@@ -18,7 +18,8 @@ export type UnitKind =
   | 'expansion'
   | 'heatTransfer'
   | 'conductivity'
-  | 'growthConstant';
+  | 'growthConstant'
+  | 'stressSquared';
 
 /** The units the numbers are held in; everything typed is turned into one of these at the door. */
 export const ourUnits = [
@@ -41,6 +42,7 @@ export const ourUnits = [
   'W/(m²·K)',
   'W/(m·K)',
   'MPa²·s',
+  'MPa²',
   // from here on: those that nobody types and only a method gives
   'mm⁴',
   '1/s',
@@ -70,4 +72,5 @@ export const ourUnitOf: Readonly<Record<UnitKind, OurUnit>> = {
   heatTransfer: 'W/(m²·K)',
   conductivity: 'W/(m·K)',
   growthConstant: 'MPa²·s',
+  stressSquared: 'MPa²',
 };

@@ -87,6 +87,7 @@ describe('a typed quantity', () => {
     ['2000 W/(m² K)', of('heatTransfer'), 2000],
     ['30 W/m/K', of('conductivity'), 30],
     ['0.5 MPa² s', of('growthConstant'), 0.5],
+    ['150 MPa^2', of('stressSquared'), 150],
   ])('%s is read', (text, wanted, value) => {
     expect(valueOf(text, wanted)).toBeCloseTo(value, value < 1 ? 9 : 4);
   });

@@ -40,6 +40,7 @@ const kindInWords: Readonly<Record<UnitKind, string>> = {
   heatTransfer: 'heat transfer',
   conductivity: 'heat conductivity',
   growthConstant: 'constant of slow growth',
+  stressSquared: 'covariance of stresses',
 };
 
 // Masses that are typed where a force is meant.

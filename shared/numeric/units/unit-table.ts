@@ -110,6 +110,7 @@ export const unitTable: readonly Unit[] = [
     factor: 1,
     spellings: ['W/(m·K)', 'W/(mK)', 'W/mK', 'W/m/K', 'Wm⁻¹K⁻¹'],
   },
+  { name: 'MPa²', kind: 'stressSquared', factor: 1, spellings: ['MPa²', 'MPa2', 'MPa^2'] },
   { name: 'MPa²·s', kind: 'growthConstant', factor: 1, spellings: ['MPa²·s', 'MPa²s', 'MPa2s', 'MPa^2s', 'MPa^2*s'] },
 
   { name: '°', kind: 'angle', factor: 1, spellings: ['°', 'º', 'deg', 'degree', 'degrees'] },

@@ -1,5 +1,6 @@
 import { requireFinite } from '../require.ts';
 import { fourPointBendingStressMPa, type FourPointBar } from './four-point-bending-stress.ts';
+import { fourPointMomentRatio } from './four-point-moment-ratio.ts';
 import type { LocalStress, OriginInBar } from './local-stress.ts';
 import { requireOriginInBar } from './require-origin-in-bar.ts';
 
@@ -17,9 +18,7 @@ export function fourPointLocalStress(bar: FourPointBar & OriginInBar): LocalStre
   requireFinite({ ...bar });
   const nominalStressMPa = fourPointBendingStressMPa(bar);
   requireOriginInBar(bar);
-  const { outerSpanMm, innerSpanMm, xMm, yMm, depthMm } = bar;
-  const betweenInnerRollers = Math.abs(xMm) <= innerSpanMm / 2;
-  const momentRatio = betweenInnerRollers ? 1 : (outerSpanMm - 2 * Math.abs(xMm)) / (outerSpanMm - innerSpanMm);
-  const depthRatio = 1 - (2 * yMm) / depthMm;
+  const momentRatio = fourPointMomentRatio(bar);
+  const depthRatio = 1 - (2 * bar.yMm) / bar.depthMm;
   return { nominalStressMPa, momentRatio, depthRatio, localStressMPa: nominalStressMPa * momentRatio * depthRatio };
 }

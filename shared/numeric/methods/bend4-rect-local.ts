@@ -2,6 +2,7 @@ import { fourPointLocalStress } from '../bending/four-point-local-stress.ts';
 import { fourPointLocalSensitivities } from '../uncertainty/four-point-local-sensitivities.ts';
 import { compressionCautions, position4Cautions, sectionCautions, slenderness4Cautions } from './bar-cautions.ts';
 import { barInputs } from './bar-inputs.ts';
+import { fourPointArms } from './four-point-arms.ts';
 import { numberGiven } from './given.ts';
 import { localStressOutputs, localStressToOutputs } from './local-stress-outputs.ts';
 import type { GivenInputs, Method } from './method.ts';
@@ -16,11 +17,8 @@ const bar = (given: GivenInputs) => ({
   yMm: numberGiven(given, 'y'),
 });
 
-/** Between the inner rollers the arm is (L − l); outside them it is (L − 2|x|), and l drops out. */
 function template(given: GivenInputs): string {
-  const inside = Math.abs(numberGiven(given, 'x')) <= numberGiven(given, 'innerSpan') / 2;
-  const arms = inside ? '({outerSpan#} − {innerSpan#})' : '({outerSpan#} − 2 × |{x#}|)';
-  return `3 × {load} × ${arms} mm / (2 × {width} × ({depth})²) × (1 − 2 × {y} / {depth})`;
+  return `3 × {load} × ${fourPointArms(given)} mm / (2 × {width} × ({depth})²) × (1 − 2 × {y} / {depth})`;
 }
 
 export const bend4RectLocal: Method = {

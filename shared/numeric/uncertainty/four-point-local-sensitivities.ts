@@ -1,6 +1,7 @@
 import type { FourPointBar } from '../bending/four-point-bending-stress.ts';
 import { fourPointLocalStress } from '../bending/four-point-local-stress.ts';
 import type { OriginInBar } from '../bending/local-stress.ts';
+import { alongFourPointBar } from './along-four-point-bar.ts';
 
 /**
  * Change of the four-point stress at an origin per unit of each input, MPa/N for the load and MPa/mm else.
@@ -11,20 +12,12 @@ import type { OriginInBar } from '../bending/local-stress.ts';
  */
 export function fourPointLocalSensitivities(bar: FourPointBar & OriginInBar) {
   const { widthMm, depthMm, yMm } = bar;
-  const { nominalStressMPa, momentRatio, localStressMPa } = fourPointLocalStress(bar);
+  const { nominalStressMPa, momentRatio, depthRatio, localStressMPa } = fourPointLocalStress(bar);
   return {
     load: fourPointLocalStress({ ...bar, loadN: 1 }).localStressMPa,
-    ...alongTheBar(bar),
+    ...alongFourPointBar({ ...bar, stressAtDepthMPa: nominalStressMPa * depthRatio }),
     width: -localStressMPa / widthMm,
     depth: (-2 * localStressMPa) / depthMm + (nominalStressMPa * momentRatio * 2 * yMm) / depthMm ** 2,
     y: (-2 * nominalStressMPa * momentRatio) / depthMm,
   };
-}
-
-/** Outer span, inner span and x. Written with the stress per mm of arm, which stays finite at the outer roller. */
-function alongTheBar(bar: FourPointBar & OriginInBar) {
-  const { nominalStressMPa, depthRatio } = fourPointLocalStress(bar);
-  const perMm = (nominalStressMPa * depthRatio) / (bar.outerSpanMm - bar.innerSpanMm);
-  if (Math.abs(bar.xMm) <= bar.innerSpanMm / 2) return { outerSpan: perMm, innerSpan: -perMm, x: 0 };
-  return { outerSpan: perMm, innerSpan: 0, x: -Math.sign(bar.xMm) * 2 * perMm };
 }

@@ -4,6 +4,7 @@ import { methods } from '../methods.ts';
 import type { GivenInputs } from '../methods/method.ts';
 
 const bar = { load: 500, outerSpan: 40, width: 4, depth: 3 };
+const rod = { load: 300, outerSpan: 40, diameter: 3 };
 const points: { id: string; inputs: Record<string, number> }[] = [
   { id: 'bend3.rect', inputs: bar },
   { id: 'bend4.rect', inputs: { ...bar, innerSpan: 20 } },
@@ -11,6 +12,22 @@ const points: { id: string; inputs: Record<string, number> }[] = [
   { id: 'bend3.rect.local', inputs: { ...bar, x: 5, y: 2.5 } },
   { id: 'bend4.rect.local', inputs: { ...bar, innerSpan: 20, x: 4, y: 0.2 } },
   { id: 'bend4.rect.local', inputs: { ...bar, innerSpan: 20, x: -14, y: 0.2 } },
+  { id: 'bend3.rod', inputs: rod },
+  { id: 'bend4.rod', inputs: { ...rod, innerSpan: 20 } },
+  { id: 'bend3.rod.local', inputs: { ...rod, x: -4, y: 0.4 } },
+  { id: 'bend4.rod.local', inputs: { ...rod, innerSpan: 20, x: 4, y: 0.4 } },
+  { id: 'bend4.rod.local', inputs: { ...rod, innerSpan: 20, x: -14, y: 0.4 } },
+  { id: 'bend4.rod.local.angle', inputs: { ...rod, innerSpan: 20, x: 13, angle: 25 } },
+  { id: 'cantilever.rod', inputs: { load: 25, arm: 60, diameter: 6 } },
+  { id: 'plate.supported.pressure', inputs: { pressure: 0.1, radius: 50, thickness: 4, poisson: 0.23 } },
+  {
+    id: 'disc.ringOnRing',
+    inputs: { load: 1000, thickness: 2, poisson: 0.22, supportDiameter: 30, loadDiameter: 10, discDiameter: 36 },
+  },
+  {
+    id: 'disc.pistonOnThreeBalls',
+    inputs: { load: 500, thickness: 1.2, poisson: 0.25, supportRadius: 5, pistonRadius: 0.7, discRadius: 7 },
+  },
   { id: 'mirror.stress', inputs: { A: 8.5, R: 0.56 } },
   { id: 'flaw.stress', inputs: { KIc: 3.5, Y: 1.29, c: 0.064 } },
 ];

@@ -1,3 +1,4 @@
+import { OutsideDomain } from '../outside-domain.ts';
 import type { GivenInputs } from './method.ts';
 
 /** The number given under a name; NaN when there is none, which every formula refuses as missing. */
@@ -27,4 +28,15 @@ export function listGiven(given: GivenInputs, name: string): readonly number[] {
 export function codeGiven(given: GivenInputs, name: string): string | undefined {
   const input = given[name];
   return input && 'code' in input ? input.code : undefined;
+}
+
+/** The word chosen under a name, one of the choices; any other, or none, is refused. */
+export function choiceGiven<Choice extends string>(
+  given: GivenInputs,
+  name: string,
+  choices: readonly Choice[],
+): Choice {
+  const chosen = choices.find((choice) => choice === codeGiven(given, name));
+  if (chosen === undefined) throw new OutsideDomain('not-a-choice', name);
+  return chosen;
 }

@@ -99,7 +99,7 @@ export const glassCases: readonly DemoCase[] = [
       {
         statement: 'A second panel of the same charge waits; breaking it needs consent.',
         standing: 'told',
-        source: 'site@vantrisse.example',
+        source: 'Mireille Ashdow, Vantrisse',
       },
     ],
     part: { description: 'Tempered panel, 360 × 10 × 1100 mm', serial: 'T-208', environment: 'air' },
@@ -170,7 +170,7 @@ export const glassCases: readonly DemoCase[] = [
       {
         statement: 'The cover was cleaned with a steel scraper in spring.',
         standing: 'told',
-        source: 'lines@pellgrove.example',
+        source: 'Anselm Wyke, Pellgrove',
       },
     ],
     part: { description: 'Sight glass, 80 mm across, 12 mm thick', serial: 'SG-7', environment: 'water' },

@@ -39,7 +39,7 @@ export const oxideCases: readonly DemoCase[] = [
         standing: 'known',
         source: 'micrometer, before the test',
       },
-      { statement: 'Powder PB-7, firing run K-118.', standing: 'told', source: 'quality-manager@ostrevell.example' },
+      { statement: 'Powder PB-7, firing run K-118.', standing: 'told', source: 'Yevka Sorrel, Ostrevell' },
       { statement: 'Rollers turned freely.', standing: 'assumed', source: 'nothing found against it' },
     ],
     part: {
@@ -116,7 +116,7 @@ export const oxideCases: readonly DemoCase[] = [
       {
         statement: 'A claim is announced; pieces and files are kept until it is settled.',
         standing: 'known',
-        source: 'letter through quality-manager@ostrevell.example',
+        source: 'letter through Yevka Sorrel, Ostrevell',
       },
       {
         statement: 'No load other than handling before the crack.',
@@ -195,7 +195,7 @@ export const oxideCases: readonly DemoCase[] = [
       {
         statement: 'Powder PB-8, firing run K-124; the sieve was changed between PB-7 and PB-8.',
         standing: 'told',
-        source: 'lot-engineer@ostrevell.example',
+        source: 'Radek Imber, Ostrevell',
       },
     ],
     part: {
@@ -262,7 +262,7 @@ export const oxideCases: readonly DemoCase[] = [
         standing: 'known',
         source: 'micrometer, before the test',
       },
-      { statement: 'Powder PB-8, firing run K-124.', standing: 'told', source: 'lot-engineer@ostrevell.example' },
+      { statement: 'Powder PB-8, firing run K-124.', standing: 'told', source: 'Radek Imber, Ostrevell' },
     ],
     part: {
       description: 'Bend bar B-22, 3 × 4 × 45 mm',

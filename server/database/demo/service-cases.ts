@@ -20,9 +20,9 @@ export const serviceCases: readonly DemoCase[] = [
       {
         statement: 'The inner side was ground at the chair to fit.',
         standing: 'told',
-        source: 'studio@cindermoor.example',
+        source: 'Livia Tarn, Cindermoor',
       },
-      { statement: 'Disc of lot LOT-Z.', standing: 'told', source: 'studio@cindermoor.example' },
+      { statement: 'Disc of lot LOT-Z.', standing: 'told', source: 'Livia Tarn, Cindermoor' },
       {
         statement: 'Disinfected before it was sent; replica taken first.',
         standing: 'known',
@@ -80,7 +80,7 @@ export const serviceCases: readonly DemoCase[] = [
       {
         statement: 'Fired on kiln car C-31 with 13 others; all 14 shipped.',
         standing: 'told',
-        source: 'quality-manager@ostrevell.example',
+        source: 'Yevka Sorrel, Ostrevell',
       },
       { statement: 'The crate was not dropped.', standing: 'told', source: 'carrier, through Pellgrove' },
       {
@@ -146,9 +146,9 @@ export const serviceCases: readonly DemoCase[] = [
       {
         statement: 'Stress at the shoulder 2400 MPa by analysis of the press setting.',
         standing: 'told',
-        source: 'analysis file from toolroom@hexlund.example',
+        source: 'analysis file from Hobart Lunde, Hexlund',
       },
-      { statement: 'The press was set higher the week before.', standing: 'told', source: 'toolroom@hexlund.example' },
+      { statement: 'The press was set higher the week before.', standing: 'told', source: 'Hobart Lunde, Hexlund' },
     ],
     part: { description: 'Punch, 8 mm across', serial: 'HX-112', environment: 'oil' },
     pieces: [
@@ -258,7 +258,7 @@ export const serviceCases: readonly DemoCase[] = [
       {
         statement: 'Found broken when the kiln was unloaded.',
         standing: 'told',
-        source: 'quality-manager@ostrevell.example',
+        source: 'Yevka Sorrel, Ostrevell',
       },
       { statement: 'No load or temperature record was kept.', standing: 'known', source: 'kiln log' },
     ],

@@ -31,9 +31,15 @@ export function CalibrationTable({ calibrations, onReplace }: CalibrationTablePr
         {calibrations.map((calibration, index) => (
           <tr key={calibration.id}>
             <th scope="row" data-word="Instrument">
-              {calibrations[index - 1]?.instrument.id === calibration.instrument.id
-                ? null
-                : calibration.instrument.name}
+              <span
+                className={
+                  calibrations[index - 1]?.instrument.id === calibration.instrument.id
+                    ? 'sr-only narrow:not-sr-only'
+                    : undefined
+                }
+              >
+                {calibration.instrument.name}
+              </span>
             </th>
             <td data-word="Calibration" className="whitespace-nowrap">
               {calibration.code} {calibration.setting}

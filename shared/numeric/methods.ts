@@ -15,7 +15,13 @@ import { discRingOnRing } from './methods/disc-ring-on-ring.ts';
 import { comparePairCorrelated } from './methods/compare-pair-correlated.ts';
 import { comparePair } from './methods/compare-pair.ts';
 import { compareTriple } from './methods/compare-triple.ts';
+import { flawApparentToughnessEmbedded } from './methods/flaw-apparent-toughness-embedded.ts';
+import { flawEquivalentSemicircle } from './methods/flaw-equivalent-semicircle.ts';
+import { flawPoreBracket } from './methods/flaw-pore-bracket.ts';
+import { flawSizeSurfaceBending } from './methods/flaw-size-surface-bending.ts';
+import { flawSize } from './methods/flaw-size.ts';
 import { flawStress } from './methods/flaw-stress.ts';
+import { kPennyGradient } from './methods/k-penny-gradient.ts';
 import { loadGiven } from './methods/load-given.ts';
 import type { Method } from './methods/method.ts';
 import { mirrorAverageRadiusEllipse } from './methods/mirror-average-radius-ellipse.ts';
@@ -26,6 +32,7 @@ import { mirrorFitMean } from './methods/mirror-fit-mean.ts';
 import { mirrorFitOrigin } from './methods/mirror-fit-origin.ts';
 import { mirrorFlawRatioBand } from './methods/mirror-flaw-ratio-band.ts';
 import { mirrorFlawRatio } from './methods/mirror-flaw-ratio.ts';
+import { mirrorGradientFactor } from './methods/mirror-gradient-factor.ts';
 import { mirrorRadius } from './methods/mirror-radius.ts';
 import { mirrorResidual } from './methods/mirror-residual.ts';
 import { mirrorStress } from './methods/mirror-stress.ts';
@@ -66,6 +73,7 @@ export const methods: readonly Method[] = [
   mirrorUncertainty,
   mirrorFlawRatio,
   mirrorFlawRatioBand,
+  mirrorGradientFactor,
   mirrorFitOrigin,
   mirrorFitMean,
   mirrorFitIntercept,
@@ -82,6 +90,12 @@ export const methods: readonly Method[] = [
   comparePairCorrelated,
   compareTriple,
   originCodeParse,
+  flawSize,
+  flawSizeSurfaceBending,
+  flawApparentToughnessEmbedded,
+  kPennyGradient,
+  flawEquivalentSemicircle,
+  flawPoreBracket,
 ];
 
 /** The method of that id and version, or nothing. */

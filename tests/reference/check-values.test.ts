@@ -6,6 +6,7 @@ import { runners } from './run-check-value.ts';
 
 // The methods that must be among those run, written out so that an empty table or an empty file fails.
 const run = [
+  'K.penny.gradient',
   'Y.corner.newmanRaju',
   'Y.edge.bending',
   'Y.edge.tension',
@@ -30,6 +31,11 @@ const run = [
   'disc.pistonOnThreeBalls.local',
   'disc.ringOnRing',
   'disc.ringOnRing.local',
+  'flaw.apparentToughness.embedded',
+  'flaw.equivalentSemicircle',
+  'flaw.pore.bracket',
+  'flaw.size',
+  'flaw.size.surface.bending',
   'flaw.stress',
   'load.given',
   'mirror.averageRadius.ellipse',
@@ -40,6 +46,7 @@ const run = [
   'mirror.fit.origin',
   'mirror.flawRatio',
   'mirror.flawRatio.band',
+  'mirror.gradientFactor',
   'mirror.radius',
   'mirror.residual',
   'mirror.stress',

@@ -12,18 +12,28 @@ export type SignedInPage = {
   complaints: string[];
 };
 
-/** A browser of their own for a person, signed in at the page's own routes. */
-export async function pageOf(
+/** A browser of their own for a person of the test laboratory, signed in at the page's own routes. */
+export function pageOf(
   browser: Browser,
   address: string,
   person: Admitted,
+  size = { width: 1440, height: 900 },
+): Promise<SignedInPage> {
+  return signedInPage(browser, address, { mail: person.mail, password: testPassword }, size);
+}
+
+/** The same by mail address and password. */
+export async function signedInPage(
+  browser: Browser,
+  address: string,
+  data: { mail: string; password: string },
   size = { width: 1440, height: 900 },
 ): Promise<SignedInPage> {
   const visitor = await visitorPage(browser, address, size);
   const { context } = visitor;
   const token = await (await context.request.get('/api/session')).json();
   const answer = await context.request.post('/api/session', {
-    data: { mail: person.mail, password: testPassword },
+    data,
     headers: { 'x-request-token': token.requestToken },
   });
   if (answer.status() !== 201) throw new Error(`not signed in: ${await answer.text()}`);

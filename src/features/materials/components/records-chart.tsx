@@ -23,7 +23,7 @@ export function RecordsChart({ spans }: { spans: readonly RecordSpan[] }) {
   const y = (value: number) => top + ((high + room - value) / (high - low + 2 * room)) * (heightPx - top - bottom);
   const words = spans.map(({ constant }) => `record ${constant.recordNumber} ${formatConstant(constant)}`).join(', ');
   return (
-    <div ref={frame}>
+    <div ref={frame} className="overflow-hidden">
       <svg
         width={width}
         height={heightPx}

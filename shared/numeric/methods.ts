@@ -1,3 +1,6 @@
+import { bendChamfer2 } from './methods/bend-chamfer2.ts';
+import { bendChamfer4 } from './methods/bend-chamfer4.ts';
+import { bendRound4 } from './methods/bend-round4.ts';
 import { bend3RectLocal } from './methods/bend3-rect-local.ts';
 import { bend3Rect } from './methods/bend3-rect.ts';
 import { bend3RodLocal } from './methods/bend3-rod-local.ts';
@@ -8,19 +11,27 @@ import { bend4RodLocalAngle } from './methods/bend4-rod-local-angle.ts';
 import { bend4RodLocal } from './methods/bend4-rod-local.ts';
 import { bend4Rod } from './methods/bend4-rod.ts';
 import { cantileverRod } from './methods/cantilever-rod.ts';
+import { comparePairCorrelated } from './methods/compare-pair-correlated.ts';
+import { comparePair } from './methods/compare-pair.ts';
+import { compareTriple } from './methods/compare-triple.ts';
 import { discPistonOnThreeBallsLocal } from './methods/disc-piston-on-three-balls-local.ts';
 import { discPistonOnThreeBalls } from './methods/disc-piston-on-three-balls.ts';
 import { discRingOnRingLocal } from './methods/disc-ring-on-ring-local.ts';
 import { discRingOnRing } from './methods/disc-ring-on-ring.ts';
-import { comparePairCorrelated } from './methods/compare-pair-correlated.ts';
-import { comparePair } from './methods/compare-pair.ts';
-import { compareTriple } from './methods/compare-triple.ts';
+import { energyBar } from './methods/energy-bar.ts';
+import { errorFriction3 } from './methods/error-friction3.ts';
+import { errorFriction4 } from './methods/error-friction4.ts';
+import { errorLargeDeflection3 } from './methods/error-large-deflection3.ts';
+import { errorWedging3 } from './methods/error-wedging3.ts';
+import { errorWedging4 } from './methods/error-wedging4.ts';
 import { flawApparentToughnessEmbedded } from './methods/flaw-apparent-toughness-embedded.ts';
 import { flawEquivalentSemicircle } from './methods/flaw-equivalent-semicircle.ts';
 import { flawPoreBracket } from './methods/flaw-pore-bracket.ts';
 import { flawSizeSurfaceBending } from './methods/flaw-size-surface-bending.ts';
 import { flawSize } from './methods/flaw-size.ts';
 import { flawStress } from './methods/flaw-stress.ts';
+import { gaugeConsistency4 } from './methods/gauge-consistency4.ts';
+import { gaugeMeanMomentRatio3 } from './methods/gauge-mean-moment-ratio3.ts';
 import { kPennyGradient } from './methods/k-penny-gradient.ts';
 import { loadGiven } from './methods/load-given.ts';
 import type { Method } from './methods/method.ts';
@@ -37,8 +48,21 @@ import { mirrorRadius } from './methods/mirror-radius.ts';
 import { mirrorResidual } from './methods/mirror-residual.ts';
 import { mirrorStress } from './methods/mirror-stress.ts';
 import { mirrorUncertainty } from './methods/mirror-uncertainty.ts';
+import { modulusGauge4 } from './methods/modulus-gauge4.ts';
+import { modulusShearFactor3 } from './methods/modulus-shear-factor3.ts';
+import { modulusSlope3 } from './methods/modulus-slope3.ts';
+import { modulusSlope4Loadpoint } from './methods/modulus-slope4-loadpoint.ts';
+import { modulusSlope4Midspan } from './methods/modulus-slope4-midspan.ts';
 import { originCodeParse } from './methods/origin-code-parse.ts';
 import { plateSupportedPressure } from './methods/plate-supported-pressure.ts';
+import { strainDeflection3 } from './methods/strain-deflection3.ts';
+import { strainDeflection4Loadpoint } from './methods/strain-deflection4-loadpoint.ts';
+import { strainDeflection4Midspan } from './methods/strain-deflection4-midspan.ts';
+import { strainDeflection4Relative } from './methods/strain-deflection4-relative.ts';
+import { strainRateCrosshead3 } from './methods/strain-rate-crosshead3.ts';
+import { strainRateCrosshead4 } from './methods/strain-rate-crosshead4.ts';
+import { validityBreakLocation4 } from './methods/validity-break-location4.ts';
+import { validitySpecimen } from './methods/validity-specimen.ts';
 import { yCornerNewmanRaju } from './methods/y-corner-newman-raju.ts';
 import { yEdgeBending } from './methods/y-edge-bending.ts';
 import { yEdgeTension } from './methods/y-edge-tension.ts';
@@ -65,6 +89,30 @@ export const methods: readonly Method[] = [
   discPistonOnThreeBallsLocal,
   plateSupportedPressure,
   loadGiven,
+  bendChamfer4,
+  bendChamfer2,
+  bendRound4,
+  strainDeflection3,
+  strainDeflection4Midspan,
+  strainDeflection4Loadpoint,
+  strainDeflection4Relative,
+  strainRateCrosshead3,
+  strainRateCrosshead4,
+  modulusSlope3,
+  modulusSlope4Loadpoint,
+  modulusSlope4Midspan,
+  modulusShearFactor3,
+  modulusGauge4,
+  gaugeMeanMomentRatio3,
+  gaugeConsistency4,
+  errorFriction4,
+  errorFriction3,
+  errorLargeDeflection3,
+  errorWedging3,
+  errorWedging4,
+  validitySpecimen,
+  validityBreakLocation4,
+  energyBar,
   mirrorStress,
   mirrorRadius,
   mirrorResidual,

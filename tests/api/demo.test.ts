@@ -111,6 +111,22 @@ describe('the demo', () => {
   });
 });
 
+describe('the verdicts of the demo', () => {
+  const asked = '/casebook/verdicts?numbers=HB-2026-0001,HB-2026-0006,HB-2026-0011';
+
+  it('stand in the Casebook for every case with a line in force', async () => {
+    expect(await bodyOf(asked)).toEqual([
+      { number: 'HB-2026-0001', verdict: 'agree' },
+      { number: 'HB-2026-0006', verdict: 'disagree' },
+    ]);
+  });
+
+  it('are told neither to a requester nor to an administrator', async () => {
+    for (const mail of ['quality-manager@ostrevell.example', 'administrator@marrowdene.example'])
+      expect(await bodyOf(asked, await signedIn(mail))).toEqual([]);
+  });
+});
+
 describe('the estimates of the demo', () => {
   it.each([
     ['0001', 'load', 1, 350.0, 14.0],

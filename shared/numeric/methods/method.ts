@@ -81,7 +81,7 @@ export type Method = {
     readonly template: (given: GivenInputs) => string;
   };
   readonly source: { readonly text: string; readonly tag: SourceTag };
-  /** May throw OutsideDomain; called only by `evaluateMethod`. */
+  /** May throw OutsideDomain; called only by `evaluateMethod` and, draw by draw, by `drawMethods`. */
   readonly run: (given: GivenInputs) => Outputs;
   /** Change of the main output per unit of each uncertain input, by input name. Absent: no first-order uncertainty. */
   readonly sensitivities?: (given: GivenInputs) => Readonly<Record<string, number>>;

@@ -22,8 +22,10 @@ export function watchOrphanedJobs(database: Database, log: Logger) {
     if (client) return client;
     const fresh = await database.pool.connect();
     fresh.once('error', () => {
-      fresh.release(true);
+      // Once given back it is the pool's, and its end no longer concerns the watch.
+      if (client !== fresh) return;
       client = null;
+      fresh.release(true);
     });
     client = fresh;
     for (const id of own) await fresh.query(`select pg_advisory_lock(${lockKey}) from (values ($1)) as own (id)`, [id]);
@@ -70,7 +72,9 @@ export function watchOrphanedJobs(database: Database, log: Logger) {
       stopped = true;
       clearInterval(timer);
       await turn;
-      client?.release(true);
+      const held = client;
+      client = null;
+      held?.release(true);
     },
   };
 }

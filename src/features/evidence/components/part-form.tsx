@@ -32,15 +32,15 @@ export function PartForm({ number, part, materials, onDone }: PartFormProps) {
   });
   // Of when the form was opened: the part itself is read again meanwhile.
   const [versionSeen, setVersionSeen] = useState(part?.version);
-  const { mutate, reset, error, isPending } = useEvidenceAct(number);
+  const { mutateAsync, reset, error, isPending } = useEvidenceAct(number);
   const keep = (typed: PartTyped, version = versionSeen) => {
     const body = { ...PartTyped.parse(typed), ...(part ? { version } : {}) };
     const act = part
       ? { method: 'PUT' as const, path: `/parts/${part.id}` }
       : { method: 'POST' as const, path: '/parts' };
-    mutate(
-      { ...act, body, schema: PartView },
-      { onSuccess: onDone, onError: (refused) => showAtFields(form, fieldNames, refused) },
+    // Of the promise, not of this form: the first part brings another page, on which the form no longer stands.
+    mutateAsync({ ...act, body, schema: PartView }).then(onDone, (refused: Error) =>
+      showAtFields(form, fieldNames, refused),
     );
   };
   const theirs = PartView.safeParse(staleRowOf(error)).data;

@@ -1,3 +1,4 @@
+import { fourPointWedgingError, threePointWedgingError } from '../bending/wedging-error.ts';
 import { numberGiven, uncertaintyGiven } from './given.ts';
 import type { Caution, GivenInputs, Outputs } from './method.ts';
 
@@ -6,9 +7,6 @@ const leastSpanOverDepth3 = 10;
 const leastArmOverDepth4 = 2.5;
 // Reach of contact stress, in depths from the roller: trade practice.
 const contactReach = 0.5;
-// Wedging opposite a roller, as part of the nominal stress times depth over span (or arm); from the exact strip solution.
-const wedging3 = 0.1743;
-const wedging4 = 0.0436;
 
 const percent = (fraction: number) => `${(100 * fraction).toFixed(1)} %`;
 
@@ -55,7 +53,7 @@ export function position3Cautions(given: GivenInputs): Caution[] {
   const cautions: Caution[] = [];
   const [x, depth, span] = [numberGiven(given, 'x'), numberGiven(given, 'depth'), numberGiven(given, 'outerSpan')];
   if (Math.abs(x) < depth) {
-    const size = percent((wedging3 * depth) / span);
+    const size = percent(-threePointWedgingError({ depthMm: depth, outerSpanMm: span }));
     const sentence = `The origin is within one depth of the loading roller: opposite it the true stress on the tensile face is lower by about ${size}.`;
     cautions.push({ code: 'wedging', weight: 'note', sentence });
   }
@@ -84,7 +82,8 @@ export function position4Cautions(given: GivenInputs): Caution[] {
     cautions.push({ code: 'contact-zone', weight: 'warning', sentence });
   }
   if (fromRoller < depth) {
-    const size = percent((wedging4 * depth) / armMm(given));
+    const spans = { outerSpanMm: numberGiven(given, 'outerSpan'), innerSpanMm: numberGiven(given, 'innerSpan') };
+    const size = percent(-fourPointWedgingError({ depthMm: depth, ...spans }));
     const sentence = `The origin is within one depth of an inner roller: opposite it the true stress on the tensile face is lower by about ${size}.`;
     cautions.push({ code: 'wedging', weight: 'note', sentence });
   }

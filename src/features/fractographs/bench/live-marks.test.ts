@@ -16,6 +16,10 @@ const drawn: MarkDrawn = {
   note: '',
 };
 
+async function settled(live: LiveMarks): Promise<void> {
+  while (live.state().waiting.length > 0) await new Promise((done) => setTimeout(done, 2));
+}
+
 /** A server of one bench: keeps marks, can be out of reach, and lets another change a mark. */
 function aServer() {
   const kept = new Map<string, MarkView>();
@@ -120,5 +124,21 @@ describe('marks sent from the bench', () => {
     await settle();
     expect(live.state().refused?.message).toContain('Second Reader');
     expect(shown()).toMatchObject([{ removed: false, version: 4 }]);
+  });
+
+  it('takes its own act back though the page has not read it again yet', async () => {
+    const { server, live, shown } = aServer();
+    const id = live.draw(drawn);
+    shown();
+    await settled(live);
+    const before = shown();
+    live.change(id, { geometry: { shape: 'point', at: { x: 9, y: 9 } } });
+    await settled(live);
+    // a list asked for before the change was kept arrives after it
+    live.see(before);
+    live.undo();
+    await settled(live);
+    expect(live.state().conflict).toBeNull();
+    expect(server.kept.get(id)).toMatchObject({ version: 3, geometry: { at: { x: 5, y: 5 } } });
   });
 });

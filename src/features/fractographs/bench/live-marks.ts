@@ -105,6 +105,8 @@ export class LiveMarks {
   #tries = 0;
   #again: ReturnType<typeof setTimeout> | undefined;
   #marks: readonly ShownMark[] = [];
+  /** Newest version of each mark that was one's own act; a list read meanwhile may still lack it. */
+  readonly #keptVersions = new Map<string, number>();
 
   constructor(calls: MarkCalls, me: Named) {
     this.#calls = calls;
@@ -204,7 +206,14 @@ export class LiveMarks {
     this.#listeners.clear();
   }
 
-  #find = (markId: string) => this.#marks.find(({ id }) => id === markId);
+  /** The mark as it stands after all one has done, however far the page is with drawing and reading it. */
+  #find(markId: string): ShownMark | undefined {
+    const seen = this.#marks.find(({ id }) => id === markId);
+    if (!seen) return undefined;
+    const laid = this.#state.waiting.reduce((mark, { act, since }) => this.#with(mark, act, since), seen);
+    const keptVersion = this.#keptVersions.get(markId) ?? 0;
+    return keptVersion > laid.version ? { ...laid, version: keptVersion, madeBy: this.#me } : laid;
+  }
 
   #with(mark: ShownMark, act: MarkAct, since: string): ShownMark {
     return act.kind === 'draw' || act.markId !== mark.id ? mark : withAct(mark, act, { me: this.#me, since });
@@ -237,8 +246,10 @@ export class LiveMarks {
   async #sendOne(next: Waiting): Promise<boolean> {
     try {
       const kept = await this.#call(next);
-      if (kept) this.#calls.keep(kept);
-      else await this.#calls.refetch();
+      if (kept) {
+        this.#keptVersions.set(kept.id, kept.version);
+        this.#calls.keep(kept);
+      } else await this.#calls.refetch();
       this.#tries = 0;
       const keptAt = new Date().toISOString();
       this.#set({ waiting: without(this.#state.waiting, next), outOfReach: false, keptAt });
@@ -267,8 +278,7 @@ export class LiveMarks {
       return false;
     }
     const markId = markOf(next.act);
-    const seen = this.#find(markId);
-    const mine = seen && this.#state.waiting.reduce((mark, { act, since }) => this.#with(mark, act, since), seen);
+    const mine = this.#find(markId);
     // what was done after it to the same mark was done to what never came to be
     const waiting = this.#state.waiting.filter(({ act }) => markOf(act) !== markId);
     const theirs = MarkView.safeParse(body.current);

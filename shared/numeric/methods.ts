@@ -32,6 +32,8 @@ import { flawSize } from './methods/flaw-size.ts';
 import { flawStress } from './methods/flaw-stress.ts';
 import { gaugeConsistency4 } from './methods/gauge-consistency4.ts';
 import { gaugeMeanMomentRatio3 } from './methods/gauge-mean-moment-ratio3.ts';
+import { hertzSphereRadialDecay } from './methods/hertz-sphere-radial-decay.ts';
+import { hertzSphere } from './methods/hertz-sphere.ts';
 import { kPennyGradient } from './methods/k-penny-gradient.ts';
 import { loadGiven } from './methods/load-given.ts';
 import type { Method } from './methods/method.ts';
@@ -55,12 +57,19 @@ import { modulusSlope4Loadpoint } from './methods/modulus-slope4-loadpoint.ts';
 import { modulusSlope4Midspan } from './methods/modulus-slope4-midspan.ts';
 import { originCodeParse } from './methods/origin-code-parse.ts';
 import { plateSupportedPressure } from './methods/plate-supported-pressure.ts';
+import { scgApparentToughness } from './methods/scg-apparent-toughness.ts';
+import { scgFullConstantRate } from './methods/scg-full-constant-rate.ts';
+import { scgRateCorrection } from './methods/scg-rate-correction.ts';
+import { scgStaticLife } from './methods/scg-static-life.ts';
 import { strainDeflection3 } from './methods/strain-deflection3.ts';
 import { strainDeflection4Loadpoint } from './methods/strain-deflection4-loadpoint.ts';
 import { strainDeflection4Midspan } from './methods/strain-deflection4-midspan.ts';
 import { strainDeflection4Relative } from './methods/strain-deflection4-relative.ts';
 import { strainRateCrosshead3 } from './methods/strain-rate-crosshead3.ts';
 import { strainRateCrosshead4 } from './methods/strain-rate-crosshead4.ts';
+import { thermalPlateBiot } from './methods/thermal-plate-biot.ts';
+import { thermalPlateInstant } from './methods/thermal-plate-instant.ts';
+import { thermalPsi } from './methods/thermal-psi.ts';
 import { validityBreakLocation4 } from './methods/validity-break-location4.ts';
 import { validitySpecimen } from './methods/validity-specimen.ts';
 import { yCornerNewmanRaju } from './methods/y-corner-newman-raju.ts';
@@ -144,6 +153,15 @@ export const methods: readonly Method[] = [
   kPennyGradient,
   flawEquivalentSemicircle,
   flawPoreBracket,
+  scgRateCorrection,
+  scgFullConstantRate,
+  scgStaticLife,
+  scgApparentToughness,
+  thermalPlateInstant,
+  thermalPlateBiot,
+  thermalPsi,
+  hertzSphere,
+  hertzSphereRadialDecay,
 ];
 
 /** The method of that id and version, or nothing. */

@@ -20,6 +20,8 @@ const halo = '#0b0e10';
 const umPerMm = 1000;
 // The bar is at most this part of the figure's width.
 const longestBarShare = 0.22;
+// The bar stands on a strip of its own under the picture, so that it never lies over one burned into the image.
+const barStripPx = 30;
 
 export type FramePx = { readonly x: number; readonly y: number; readonly width: number; readonly height: number };
 export type DrawnMark = Pick<MarkView, 'number' | 'kind' | 'geometry'>;
@@ -45,11 +47,11 @@ export function figureSvg(drawing: FigureDrawing): string {
     x: ((x - framePx.x) / framePx.width) * widthPx,
     y: ((y - framePx.y) / framePx.height) * heightPx,
   });
-  const size = `width="${widthPx}" height="${heightPx}"`;
+  const wholePx = heightPx + (drawing.scale === undefined ? 0 : barStripPx);
   return [
-    `<svg xmlns="http://www.w3.org/2000/svg" ${size} viewBox="0 0 ${widthPx} ${heightPx}" role="img">`,
+    `<svg xmlns="http://www.w3.org/2000/svg" width="${widthPx}" height="${wholePx}" viewBox="0 0 ${widthPx} ${wholePx}" role="img">`,
     `<title>${escaped(words)}</title>`,
-    `<image href="${escaped(picture)}" ${size} preserveAspectRatio="none"/>`,
+    `<image href="${escaped(picture)}" width="${widthPx}" height="${heightPx}" preserveAspectRatio="none"/>`,
     ...drawing.marks.map((mark) => markSvg(mark, toFigure)),
     drawing.scale === undefined ? '' : barSvg(drawing, drawing.scale),
     '</svg>',
@@ -131,8 +133,9 @@ function labelSvg(mark: DrawnMark, line: readonly PointPx[], ink: string): strin
 }
 
 function barSvg({ widthPx, heightPx, framePx }: FigureDrawing, scale: Pick<ScaleView, 'pixelSizeXUm'> | null): string {
-  const y = heightPx - 16;
-  if (!scale) return textSvg({ x: 16, y: y + 4 }, 'uncalibrated', { ink: '#ffffff', anchor: 'start' });
+  const y = heightPx + barStripPx / 2;
+  const strip = `<rect y="${heightPx}" width="${widthPx}" height="${barStripPx}" fill="${halo}"/>`;
+  if (!scale) return strip + textSvg({ x: 16, y: y + 4 }, 'uncalibrated', { ink: '#ffffff', anchor: 'start' });
   const umPerFigurePx = (scale.pixelSizeXUm * framePx.width) / widthPx;
   const mostUm = widthPx * longestBarShare * umPerFigurePx;
   const power = 10 ** Math.floor(Math.log10(mostUm));
@@ -142,6 +145,7 @@ function barSvg({ widthPx, heightPx, framePx }: FigureDrawing, scale: Pick<Scale
   const words =
     lengthUm >= umPerMm ? `${formatNumber(lengthUm / umPerMm)}\u00a0mm` : `${formatNumber(lengthUm)}\u00a0µm`;
   return (
+    strip +
     `<path d="${bar}" fill="none" stroke="${halo}" stroke-width="4.5" opacity="0.8"/>` +
     `<path d="${bar}" fill="none" stroke="#fff" stroke-width="1.8"/>` +
     textSvg({ x: 26 + length, y: y + 4.5 }, words, { ink: '#ffffff', anchor: 'start' })

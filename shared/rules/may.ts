@@ -101,7 +101,7 @@ export const laboratoryActs = Object.keys(laboratoryActTable) as LaboratoryAct[]
 /** May this person do the act, outside any case? */
 export function mayInLaboratory(person: Person, act: LaboratoryAct): Answer {
   const row: { roles: readonly Role[]; laboratory: boolean; words: string } = laboratoryActTable[act];
-  if (!holdsOneOf(person, row.roles)) return refused(`Only a person who is ${listed(row.roles)} may ${row.words}.`);
+  if (!holdsOneOf(person, row.roles)) return refused(`Only ${listed(row.roles.map(withArticle))} may ${row.words}.`);
   if (row.laboratory && person.organisationKind !== 'laboratory')
     return refused(`Only the laboratory's own people may ${row.words}.`);
   return allowed;
@@ -122,7 +122,7 @@ export function seesCase(person: Person, facts: CaseFacts): boolean {
 export function may(person: Person, act: CaseAct, facts: CaseFacts): Answer {
   const row: CaseActRow = caseActTable[act];
   if (!seesCase(person, facts)) return refused('There is nothing here for you.');
-  if (!holdsOneOf(person, row.roles)) return refused(`Only a person who is ${listed(row.roles)} may ${row.words}.`);
+  if (!holdsOneOf(person, row.roles)) return refused(`Only ${listed(row.roles.map(withArticle))} may ${row.words}.`);
   if (person.organisationKind !== 'laboratory' && act !== 'follow')
     return refused(`Only the laboratory's own people may ${row.words}.`);
   return mayNow(person, row, facts);
@@ -131,6 +131,9 @@ export function may(person: Person, act: CaseAct, facts: CaseFacts): Answer {
 function mayNow(person: Person, row: CaseActRow, facts: CaseFacts): Answer {
   if (facts.onHold && !row.onHold) return refused(`This case is on hold; take it off hold to ${row.words}.`);
   const states = row.states === 'working' ? workingStates : row.states;
+  if (states !== 'any' && facts.state === 'closed')
+    return refused('This case is closed and sealed; it changes only by amendment.');
+  if (states !== 'any' && facts.state === 'withdrawn') return refused('This case is withdrawn; nothing in it changes.');
   if (states !== 'any' && !states.some((state) => state === facts.state))
     return refused(`This case is ${facts.state}; one can ${row.words} while it is ${listed(states)}.`);
   const isAuthor = facts.authorIds.includes(person.id);
@@ -146,6 +149,8 @@ const refused = (reason: string): Answer => ({ allowed: false, reason });
 function holdsOneOf(person: Person, roles: readonly Role[]): boolean {
   return roles.some((role) => person.roles.includes(role));
 }
+
+const withArticle = (role: Role) => `${/^[aeiou]/.test(role) ? 'an' : 'a'} ${role}`;
 
 function listed(words: readonly string[]): string {
   return words.length < 2 ? (words[0] ?? 'no one') : `${words.slice(0, -1).join(', ')} or ${words.at(-1)}`;

@@ -209,7 +209,7 @@ describe('the findings on two pages at once', () => {
     await page.getByText('The break started at the tensile edge.').waitFor();
     expect(await page.locator('.findings-prose').getAttribute('contenteditable')).toBe('false');
     expect(await page.getByRole('toolbar').count()).toBe(0);
-    await page.getByText('Only a person who is analyst or engineer may write in the findings.').waitFor();
+    await page.getByText('Only an analyst or an engineer may write in the findings.').waitFor();
     await look(page, 'findings-manager');
     expect(manager.complaints).toEqual([]);
   });

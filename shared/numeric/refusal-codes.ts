@@ -29,6 +29,7 @@ export const refusalCodes = [
   'negative-uncertainty',
   'unknown-method',
   'unknown-input',
+  'unknown-unit',
 ] as const;
 
 export type RefusalCode = (typeof refusalCodes)[number];

@@ -32,6 +32,7 @@ const sentences: Readonly<Record<RefusalCode, (field: string) => string>> = {
   'missing-uncertainty': (field) => `${field} has no uncertainty: state one that is more than 0.`,
   'negative-uncertainty': (field) => `The uncertainty of ${field} must be 0 or more.`,
   'unknown-method': (field) => `There is no method “${field}” in this version: choose one from the list.`,
+  'unknown-unit': (field) => `${field} has a unit that is not known here or measures something else.`,
   'unknown-input': (field) => `${field} does not belong to this method: take it out.`,
 };
 

@@ -1,15 +1,8 @@
 import { readFileSync } from 'node:fs';
 import { z } from 'zod';
+import { ReckoningWanted } from '#shared/contracts/reckonings.ts';
 
-const Quantity = z.object({
-  value: z.union([z.number(), z.string(), z.boolean(), z.null(), z.array(z.union([z.number(), z.null()]))]),
-  unit: z.string(),
-});
-
-const CheckValue = z.object({
-  id: z.string(),
-  method: z.string(),
-  inputs: z.record(z.string(), Quantity),
+const CheckValue = ReckoningWanted.extend({
   expected: z.record(z.string(), z.object({ value: z.unknown(), unit: z.string() })),
   tolerance: z.object({ rel: z.number().optional(), abs: z.number().optional() }),
   source: z.string(),
@@ -24,8 +17,9 @@ export const checkValues = z
   .array(CheckValue)
   .parse(JSON.parse(readFileSync(new URL('./check-values.json', import.meta.url), 'utf8')));
 
-/** The number of an input; NaN where the reference leaves it out (`null`). */
-export function numberIn(inputs: CheckValue['inputs'], name: string): number {
-  const value = inputs[name]?.value;
-  return typeof value === 'number' ? value : Number.NaN;
+/** Numbers within the tolerance of the entry (its printed digits); words, yes and no, and all else exactly. */
+export function agrees(found: unknown, wanted: unknown, tolerance: CheckValue['tolerance']): boolean {
+  if (typeof wanted !== 'number') return JSON.stringify(found) === JSON.stringify(wanted);
+  if (typeof found !== 'number') return false;
+  return Math.abs(found - wanted) <= (tolerance.rel ?? 0) * Math.abs(wanted) + (tolerance.abs ?? 0);
 }

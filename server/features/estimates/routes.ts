@@ -7,11 +7,13 @@ import {
 } from '#shared/contracts/estimates.ts';
 import { VerdictsAsked } from '#shared/contracts/casebook-verdicts.ts';
 import { CasePath } from '#shared/contracts/ids.ts';
+import { ReckoningsWanted } from '#shared/contracts/reckonings.ts';
 import { route } from '../../http/route.ts';
 import { listEstimates, loadEstimateView } from './service/list-estimates.ts';
 import { listVerdicts } from './service/list-verdicts.ts';
 import { makeEstimate } from './service/make-estimate.ts';
 import { recomputeEstimate } from './service/recompute-estimate.ts';
+import { reckonList } from './service/reckon-list.ts';
 import { renewEstimate } from './service/renew-estimate.ts';
 import { changeStanding, keepOldValue } from './service/settle-estimate.ts';
 
@@ -88,5 +90,12 @@ export const estimateRoutes = [
       await changeStanding(context, heldCase, params.estimateId, body);
       return loadEstimateView(context.reader, heldCase, params.estimateId);
     },
+  }),
+  route({
+    method: 'post',
+    path: '/reckonings',
+    rule: { who: 'may', act: 'reckon' },
+    body: ReckoningsWanted,
+    handle: ({ body }) => Promise.resolve(reckonList(body)),
   }),
 ];

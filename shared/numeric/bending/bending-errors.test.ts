@@ -1,7 +1,9 @@
 import { describe, expect, it } from 'vitest';
-import { fourPointFrictionError, threePointFrictionError } from './friction-error.ts';
+import { fourPointFrictionError } from './four-point-friction-error.ts';
+import { threePointFrictionError } from './three-point-friction-error.ts';
 import { largeDeflectionFactor } from './large-deflection-factor.ts';
-import { fourPointWedgingError, threePointWedgingError } from './wedging-error.ts';
+import { fourPointWedgingError } from './four-point-wedging-error.ts';
+import { threePointWedgingError } from './three-point-wedging-error.ts';
 
 const bar = { frictionCoefficient: 0.2, depthMm: 3, outerSpanMm: 40, innerSpanMm: 20 };
 

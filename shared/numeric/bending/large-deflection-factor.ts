@@ -1,5 +1,5 @@
 import { requireFinite, requireNotNegative, requirePositive, requireThat } from '../require.ts';
-import { mostDeflectionOverSpan } from './strain-from-deflection.ts';
+import { mostDeflectionOverSpan } from './require-small-deflection.ts';
 
 /**
  * True moment at mid-span of a three-point bar on free rollers over FL/4, dimensionless, ≥ 1. Method `error.largeDeflection3`.

@@ -1,7 +1,9 @@
 import { describe, expect, it } from 'vitest';
-import { gaugeAgainstBeam, gaugeModulus } from './gauge-reading.ts';
+import { gaugeAgainstBeam } from './gauge-against-beam.ts';
+import { gaugeModulus } from './gauge-modulus.ts';
 import { meanMomentRatio } from './mean-moment-ratio.ts';
-import { fourPointModulus, threePointModulus } from './modulus-from-slope.ts';
+import { fourPointModulus } from './four-point-modulus.ts';
+import { threePointModulus } from './three-point-modulus.ts';
 import { shearDeflectionFactor } from './shear-deflection-factor.ts';
 
 const bar = { slopeNPerMm: 2100, machineMmPerN: 0, outerSpanMm: 40, innerSpanMm: 20, widthMm: 4, depthMm: 3 };

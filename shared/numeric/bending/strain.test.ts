@@ -1,6 +1,9 @@
 import { describe, expect, it } from 'vitest';
-import { fourPointStrain, relativeStrain, threePointStrain } from './strain-from-deflection.ts';
-import { fourPointStrainRatePerS, threePointStrainRatePerS } from './strain-rate.ts';
+import { fourPointStrain } from './four-point-strain.ts';
+import { relativeStrain } from './relative-strain.ts';
+import { threePointStrain } from './three-point-strain.ts';
+import { fourPointStrainRatePerS } from './four-point-strain-rate.ts';
+import { threePointStrainRatePerS } from './three-point-strain-rate.ts';
 
 const bar = { depthMm: 3, deflectionMm: 0.12, outerSpanMm: 40, innerSpanMm: 20 };
 

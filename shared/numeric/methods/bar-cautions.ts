@@ -1,4 +1,5 @@
-import { fourPointWedgingError, threePointWedgingError } from '../bending/wedging-error.ts';
+import { fourPointWedgingError } from '../bending/four-point-wedging-error.ts';
+import { threePointWedgingError } from '../bending/three-point-wedging-error.ts';
 import { numberGiven, uncertaintyGiven } from './given.ts';
 import type { Caution, GivenInputs, Outputs } from './method.ts';
 

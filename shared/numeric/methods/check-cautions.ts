@@ -1,4 +1,4 @@
-import { mostDeflectionOverSpan } from '../bending/strain-from-deflection.ts';
+import { mostDeflectionOverSpan } from '../bending/require-small-deflection.ts';
 import { numberGiven } from './given.ts';
 import type { Caution, GivenInputs, Outputs } from './method.ts';
 

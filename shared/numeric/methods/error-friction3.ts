@@ -1,4 +1,4 @@
-import { threePointFrictionError } from '../bending/friction-error.ts';
+import { threePointFrictionError } from '../bending/three-point-friction-error.ts';
 import { frictionCautions } from './check-cautions.ts';
 import { checkInputs } from './check-inputs.ts';
 import { checkOutputs } from './check-outputs.ts';

@@ -1,4 +1,4 @@
-import { fourPointFrictionError } from '../bending/friction-error.ts';
+import { fourPointFrictionError } from '../bending/four-point-friction-error.ts';
 import { frictionCautions } from './check-cautions.ts';
 import { checkInputs } from './check-inputs.ts';
 import { checkOutputs } from './check-outputs.ts';

@@ -1,4 +1,4 @@
-import { threePointWedgingError } from '../bending/wedging-error.ts';
+import { threePointWedgingError } from '../bending/three-point-wedging-error.ts';
 import { checkInputs } from './check-inputs.ts';
 import { checkOutputs } from './check-outputs.ts';
 import { numberGiven } from './given.ts';

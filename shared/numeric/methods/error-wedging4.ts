@@ -1,4 +1,4 @@
-import { fourPointWedgingError } from '../bending/wedging-error.ts';
+import { fourPointWedgingError } from '../bending/four-point-wedging-error.ts';
 import { checkInputs } from './check-inputs.ts';
 import { checkOutputs } from './check-outputs.ts';
 import { numberGiven } from './given.ts';

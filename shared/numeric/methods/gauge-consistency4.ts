@@ -1,4 +1,4 @@
-import { gaugeAgainstBeam } from '../bending/gauge-reading.ts';
+import { gaugeAgainstBeam } from '../bending/gauge-against-beam.ts';
 import { gaugeCautions } from './check-cautions.ts';
 import { checkInputs } from './check-inputs.ts';
 import { numberGiven } from './given.ts';

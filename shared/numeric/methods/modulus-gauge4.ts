@@ -1,4 +1,4 @@
-import { gaugeModulus } from '../bending/gauge-reading.ts';
+import { gaugeModulus } from '../bending/gauge-modulus.ts';
 import { sectionCautions } from './bar-cautions.ts';
 import { checkInputs } from './check-inputs.ts';
 import { checkOutputs } from './check-outputs.ts';

@@ -1,4 +1,4 @@
-import { threePointModulus } from '../bending/modulus-from-slope.ts';
+import { threePointModulus } from '../bending/three-point-modulus.ts';
 import { apparentModulusCautions } from './check-cautions.ts';
 import { checkInputs } from './check-inputs.ts';
 import { checkOutputs } from './check-outputs.ts';

@@ -1,4 +1,4 @@
-import { fourPointModulus } from '../bending/modulus-from-slope.ts';
+import { fourPointModulus } from '../bending/four-point-modulus.ts';
 import { apparentModulusCautions } from './check-cautions.ts';
 import { checkInputs } from './check-inputs.ts';
 import { checkOutputs } from './check-outputs.ts';

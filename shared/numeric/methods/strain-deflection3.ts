@@ -1,4 +1,4 @@
-import { threePointStrain } from '../bending/strain-from-deflection.ts';
+import { threePointStrain } from '../bending/three-point-strain.ts';
 import { deflectionCautions } from './check-cautions.ts';
 import { checkInputs } from './check-inputs.ts';
 import { checkOutputs } from './check-outputs.ts';

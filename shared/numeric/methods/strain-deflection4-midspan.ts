@@ -1,4 +1,4 @@
-import { fourPointStrain } from '../bending/strain-from-deflection.ts';
+import { fourPointStrain } from '../bending/four-point-strain.ts';
 import { deflectionCautions } from './check-cautions.ts';
 import { checkInputs } from './check-inputs.ts';
 import { checkOutputs } from './check-outputs.ts';

@@ -1,4 +1,4 @@
-import { relativeStrain } from '../bending/strain-from-deflection.ts';
+import { relativeStrain } from '../bending/relative-strain.ts';
 import { deflectionCautions } from './check-cautions.ts';
 import { checkInputs } from './check-inputs.ts';
 import { checkOutputs } from './check-outputs.ts';

@@ -1,4 +1,4 @@
-import { threePointStrainRatePerS } from '../bending/strain-rate.ts';
+import { threePointStrainRatePerS } from '../bending/three-point-strain-rate.ts';
 import { checkInputs } from './check-inputs.ts';
 import { checkOutputs } from './check-outputs.ts';
 import { numberGiven } from './given.ts';

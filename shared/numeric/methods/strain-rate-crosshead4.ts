@@ -1,4 +1,4 @@
-import { fourPointStrainRatePerS } from '../bending/strain-rate.ts';
+import { fourPointStrainRatePerS } from '../bending/four-point-strain-rate.ts';
 import { checkInputs } from './check-inputs.ts';
 import { checkOutputs } from './check-outputs.ts';
 import { numberGiven } from './given.ts';

@@ -29,6 +29,7 @@ const points: { id: string; inputs: Record<string, number> }[] = [
     inputs: { load: 500, thickness: 1.2, poisson: 0.25, supportRadius: 5, pistonRadius: 0.7, discRadius: 7 },
   },
   { id: 'mirror.stress', inputs: { A: 8.5, R: 0.56 } },
+  { id: 'mirror.residual', inputs: { A: 1.9, R: 0.3, appliedStress: 140 } },
   { id: 'flaw.stress', inputs: { KIc: 3.5, Y: 1.29, c: 0.064 } },
 ];
 

@@ -79,16 +79,20 @@ export function markStale(view: EditorView, store: StaleMarginStore, stale: Read
   view.dispatch(view.state.tr.setMeta(key, true).setMeta('addToHistory', false));
 }
 
-/** Notes of neighbouring blocks stand under one another, never over. */
+/** Notes of neighbouring blocks stand under one another, never over, and the sheet grows to hold the last of them. */
 export function keepNotesApart(view: EditorView): void {
   requestAnimationFrame(() => {
     let least = 0;
+    let isBeside = false;
     for (const host of view.dom.querySelectorAll<HTMLElement>(':scope > .findings-notes')) {
       host.style.marginTop = '';
       const { top, height } = host.getBoundingClientRect();
-      if (getComputedStyle(host).position === 'absolute' && top < least) host.style.marginTop = `${least - top}px`;
+      isBeside = getComputedStyle(host).position === 'absolute';
+      if (isBeside && top < least) host.style.marginTop = `${least - top}px`;
       least = host.getBoundingClientRect().top + height + 10;
     }
+    const sheet = view.dom.parentElement;
+    if (sheet) sheet.style.minHeight = isBeside ? `${least - sheet.getBoundingClientRect().top}px` : '';
   });
 }
 

@@ -34,7 +34,7 @@ export function MarkDetails({ mark, closedBecause, onChange, onRemove, onVersion
         <p className="text-s text-ink-2">{closedBecause}</p>
       ) : (
         <MarkNumbers
-          key={mark.version}
+          key={mark.id}
           name={name}
           geometry={mark.geometry}
           onKeep={(geometry) => onChange({ geometry })}

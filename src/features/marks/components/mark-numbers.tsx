@@ -5,10 +5,14 @@ import { fieldsOf, readTyped, withFields } from '../geometry-fields.ts';
 
 type MarkNumbersProps = { name: string; geometry: MarkGeometry; onKeep: (geometry: MarkGeometry) => void };
 
-/** The coordinates or half-axes of a mark as fields, so that it can be moved without a pointer. Given a key by version. */
+/**
+ * The coordinates or half-axes of a mark as fields, so that it can be moved without a pointer. What is being typed stays
+ * when the mark moves meanwhile; the other fields follow it. Given a key by mark.
+ */
 export function MarkNumbers({ name, geometry, onKeep }: MarkNumbersProps) {
   const fields = fieldsOf(geometry);
-  const [typed, setTyped] = useState(() => fields.map(({ value }) => String(Math.round(value * 100) / 100)));
+  const [touched, setTouched] = useState<Readonly<Record<number, string>>>({});
+  const typed = fields.map(({ value }, index) => touched[index] ?? shown(value));
   const [fault, setFault] = useState<string | null>(null);
   const keep = (event: FormEvent) => {
     event.preventDefault();
@@ -16,6 +20,7 @@ export function MarkNumbers({ name, geometry, onKeep }: MarkNumbersProps) {
     const wrong = values.findIndex((value) => value === null);
     if (wrong >= 0) return setFault(`${fields[wrong].word} is not a number. Type it as 123.4.`);
     setFault(null);
+    setTouched({});
     // a number left as it was keeps all its digits
     onKeep(
       withFields(
@@ -35,7 +40,7 @@ export function MarkNumbers({ name, geometry, onKeep }: MarkNumbersProps) {
             aria-label={`${name}, ${word}, ${unit}`}
             className="num h-7 w-[84px] rounded-[2px] border border-control bg-sheet px-2 text-ink coarse:h-[44px]"
             value={typed[index]}
-            onChange={(event) => setTyped(typed.map((text, each) => (each === index ? event.target.value : text)))}
+            onChange={(event) => setTouched({ ...touched, [index]: event.target.value })}
           />
         </label>
       ))}
@@ -51,6 +56,8 @@ export function MarkNumbers({ name, geometry, onKeep }: MarkNumbersProps) {
   );
 }
 
+const shown = (value: number): string => String(Math.round(value * 100) / 100);
+
 function untouched(value: number, text: string): number | null {
-  return String(Math.round(value * 100) / 100) === text ? value : null;
+  return shown(value) === text ? value : null;
 }

@@ -28,10 +28,10 @@ const hashOf = (bytes: Uint8Array) => createHash('sha256').update(bytes).digest(
 
 /** Every file in the folders where bytes arrive and stay. */
 async function keptNames(): Promise<string[]> {
-  const names = await readdir(server.uploadsFolder, { recursive: true, withFileTypes: true });
-  return names
-    .filter((entry) => entry.isFile() && !/derived|working/.test(entry.parentPath))
-    .map((entry) => join(entry.parentPath, entry.name));
+  const list = (room: string) =>
+    readdir(join(server.uploadsFolder, room), { recursive: true, withFileTypes: true }).catch(() => []);
+  const names = [...(await list('arriving')), ...(await list('originals'))];
+  return names.filter((entry) => entry.isFile()).map((entry) => join(entry.parentPath, entry.name));
 }
 
 describe('a file brought in', () => {

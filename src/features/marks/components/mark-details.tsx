@@ -33,12 +33,7 @@ export function MarkDetails({ mark, closedBecause, onChange, onRemove, onVersion
       {closed ? (
         <p className="text-s text-ink-2">{closedBecause}</p>
       ) : (
-        <MarkNumbers
-          key={mark.id}
-          name={name}
-          geometry={mark.geometry}
-          onKeep={(geometry) => onChange({ geometry })}
-        />
+        <MarkNumbers key={mark.id} name={name} geometry={mark.geometry} onKeep={(geometry) => onChange({ geometry })} />
       )}
       <p className="acts">
         {closed ? null : (

@@ -9,16 +9,14 @@ import { fractographsOf } from '#src/features/fractographs/api.ts';
 import { FigureStrip } from '#src/features/fractographs/components/figure-strip.tsx';
 import { FigureWithMarks } from '#src/features/fractographs/components/figure-with-marks.tsx';
 import { marksOf } from '#src/features/marks/api.ts';
-import { Refusal } from '#src/http/api.ts';
-import { Button } from '#src/ui/button.tsx';
 import { EmptyState } from '#src/ui/empty-state.tsx';
-import { ErrorState } from '#src/ui/error-state.tsx';
 import { FigureCaption } from '#src/ui/figure-caption.tsx';
 import { MatingFacesHint } from '#src/ui/glyphs/mating-faces-hint.tsx';
 import { LoadingState } from '#src/ui/loading-state.tsx';
 import { Page } from '#src/ui/page.tsx';
 import { RuleHead } from '#src/ui/rule-head.tsx';
 import { Spread } from '#src/ui/spread.tsx';
+import { ChapterNotRead } from './chapter-not-read.tsx';
 import { useCase } from './case-context.ts';
 
 const seenFolio = { chapter: 'iv', words: 'What was seen', side: 'left' } as const;
@@ -29,7 +27,15 @@ export function Component() {
   const { number = '' } = useParams();
   const { case: view, acts } = useCase();
   const estimates = useQuery(estimatesOf(number));
-  if (estimates.isError) return <NotRead error={estimates.error} onAgain={() => void estimates.refetch()} />;
+  if (estimates.isError)
+    return (
+      <ChapterNotRead
+        chapter="Estimates"
+        what="The estimates"
+        error={estimates.error}
+        onAgain={() => void estimates.refetch()}
+      />
+    );
   if (estimates.isPending) return <Reading />;
   return (
     <Spread>
@@ -112,24 +118,6 @@ function Reading() {
         <LoadingState words="Reading estimates…">
           <RuleHead aside="three lines of evidence">Stress at the origin</RuleHead>
         </LoadingState>
-      </Page>
-    </Spread>
-  );
-}
-
-function NotRead({ error, onAgain }: { error: Error; onAgain: () => void }) {
-  const refusal = error instanceof Refusal ? error.body : null;
-  const isRight = refusal?.code === 'not-allowed' || refusal?.code === 'not-found';
-  return (
-    <Spread shape="single">
-      <Page label="Estimates">
-        <ErrorState
-          what={isRight ? 'The estimates of this case are not open to you.' : 'The estimates could not be read.'}
-          why={error.message}
-          holds={isRight ? 'Ask the laboratory who has this case.' : 'Nothing was lost: what had been kept stands.'}
-          reference={refusal?.reference}
-          acts={isRight ? null : <Button onClick={onAgain}>Read them again</Button>}
-        />
       </Page>
     </Spread>
   );

@@ -8,14 +8,12 @@ import { evidenceOf, facesTakenOf, materialsOffered } from '#src/features/eviden
 import type { FacePicture } from '#src/features/evidence/components/face-pictures.ts';
 import { PiecesPage } from '#src/features/evidence/components/pieces-page.tsx';
 import { SeenPage } from '#src/features/evidence/components/seen-page.tsx';
-import { Refusal } from '#src/http/api.ts';
 import { usePerson } from '#src/http/session.ts';
-import { Button } from '#src/ui/button.tsx';
-import { ErrorState } from '#src/ui/error-state.tsx';
 import { LoadingState } from '#src/ui/loading-state.tsx';
 import { Page } from '#src/ui/page.tsx';
 import { RuleHead } from '#src/ui/rule-head.tsx';
 import { Spread } from '#src/ui/spread.tsx';
+import { ChapterNotRead } from './chapter-not-read.tsx';
 
 /** Chapter ii: what broke, its pieces, what is not there, and which faces belong together. */
 export function Component() {
@@ -26,7 +24,15 @@ export function Component() {
   const fractographs = useQuery(facesTakenOf(number));
   const materials = useQuery({ ...materialsOffered, enabled: mayInLaboratory(person, 'read materials').allowed });
   if (evidence.isPending) return <Reading />;
-  if (evidence.isError) return <NotRead error={evidence.error} onAgain={() => void evidence.refetch()} />;
+  if (evidence.isError)
+    return (
+      <ChapterNotRead
+        chapter="Evidence"
+        what="The pieces"
+        error={evidence.error}
+        onAgain={() => void evidence.refetch()}
+      />
+    );
   const offered = materials.data ?? [];
   const pictures = facePicturesFrom(number, fractographs.data ?? []);
   return (
@@ -73,24 +79,6 @@ function Reading() {
         <LoadingState words="Reading pieces…">
           <RuleHead>Pieces</RuleHead>
         </LoadingState>
-      </Page>
-    </Spread>
-  );
-}
-
-function NotRead({ error, onAgain }: { error: Error; onAgain: () => void }) {
-  const refusal = error instanceof Refusal ? error.body : null;
-  const isRight = refusal?.code === 'not-allowed' || refusal?.code === 'not-found';
-  return (
-    <Spread shape="single">
-      <Page label="Evidence">
-        <ErrorState
-          what={isRight ? 'The pieces of this case are not open to you.' : 'The pieces could not be read.'}
-          why={error.message}
-          holds={isRight ? 'Ask the laboratory who has this case.' : 'Nothing was lost: what had been kept stands.'}
-          reference={refusal?.reference}
-          acts={isRight ? null : <Button onClick={onAgain}>Read them again</Button>}
-        />
       </Page>
     </Spread>
   );
